@@ -26,8 +26,10 @@ export function unitSpelled(text: string): UnitSpelling | undefined {
 export function nearestUnits(name: string, most = 3): readonly string[] {
   const rows = units.filter((row) => row.words.includes(name)).map((row) => row.symbol);
   const meant = [...(shopWords.get(name.toLowerCase()) ?? []), ...rows];
-  const near = nearestNames(name, suggestions, most).map((text) => unitSpelled(text)?.canonical ?? text);
-  return [...new Set([...meant, ...near])].slice(0, most);
+  if (meant.length > 0) return meant.slice(0, most);
+  // Twice as many, since two spellings of one unit may be among them.
+  const near = nearestNames(name, suggestions, 2 * most).map((text) => unitSpelled(text)?.canonical ?? text);
+  return [...new Set(near)].slice(0, most);
 }
 
 /** Words that mean a prefixed or a composed unit. A micron may be a length or a pressure. */
@@ -55,11 +57,15 @@ const suggestions: readonly string[] = [
 ].map((spelling) => spelling.text);
 
 function spellingsOfRow(row: UnitRow): UnitSpelling[] {
-  const allowed = prefixes.filter(({ symbol }) => row.prefixes === 'all' || row.prefixes.includes(symbol));
-  return [undefined, ...allowed].flatMap((prefix) => {
+  return [undefined, ...allowedPrefixes(row)].flatMap((prefix) => {
     const canonical = (prefix?.symbol ?? '') + row.symbol;
     const starts = prefix ? [prefix.symbol, ...prefix.aliases] : [''];
     const ends = [row.symbol, ...row.aliases];
     return starts.flatMap((start) => ends.map((end) => ({ text: start + end, canonical, row, prefix })));
   });
+}
+
+function allowedPrefixes({ prefixes: allowed }: UnitRow): readonly Prefix[] {
+  if (allowed === 'all') return prefixes;
+  return allowed === 'none' ? [] : prefixes.filter(({ symbol }) => allowed.includes(symbol));
 }

@@ -20,13 +20,14 @@ export interface UnitRow {
   /** What people write who mean this unit; never read, only used to suggest the right spelling. */
   readonly words: readonly string[];
   /**
-   * The coherent SI unit's number in this unit, as exact decimals joined by `*` and `/`.
+   * The number of coherent SI units in this unit, as exact decimals joined by `*` and `/`.
    * Of a standard flow it is the volume per time, in m³/s.
    */
   readonly factor: string;
   /** Kelvin at the zero of an offset unit. */
   readonly zero?: string;
   readonly dimension: Dimension;
+  /** Which prefixes it takes, by their symbols. */
   readonly prefixes: 'all' | 'none' | readonly string[];
   readonly kind: UnitKind;
   /** Where the factor is defined. */
@@ -54,17 +55,21 @@ const voltage = divideDimensions(power, current);
 const resistance = divideDimensions(voltage, current);
 const magneticFlux = multiplyDimensions(voltage, time);
 const dose = divideDimensions(energy, mass);
+const amountFlow = divideDimensions(amount, time);
 
 const brochure = 'SI Brochure, 9th edition (2019)';
 const baseUnits = `${brochure}, table 2`;
 const namedUnits = `${brochure}, table 4`;
 const acceptedUnits = `${brochure}, table 8`;
-const sp811 = 'NIST SP 811 (2008), appendix B';
+const sp811 = 'NIST SP 811 (2008), appendix B.8';
 const iyp = 'International yard and pound agreement (1959)';
+const poundForce = `${iyp}; standard gravity of the 3rd CGPM (1901)`;
+const debye = '1e-18 statC·cm, with the speed of light of the SI Brochure';
 const codata = 'CODATA 2018';
 const parts = 'ISO 80000-1:2009, 6.5.5';
 const practice = 'common practice, no source';
 
+const poundPerSquareInch = '0.45359237 * 9.80665 / 0.0254 / 0.0254';
 const thousandUp = ['k', 'M', 'G'];
 const small = ['m', 'µ', 'n', 'p'];
 
@@ -111,58 +116,30 @@ export const units: readonly UnitRow[] = [
   row('Bq', '1', perTime, namedUnits, 'becquerel, 1/s', { prefixes: 'all', words: ['becquerel'] }),
   row('Gy', '1', dose, namedUnits, 'gray, J/kg', { prefixes: 'all', words: ['gray'] }),
   row('Sv', '1', dose, namedUnits, 'sievert, J/kg', { prefixes: 'all', words: ['sievert'] }),
-  row('kat', '1', multiplyDimensions(amount, perTime), namedUnits, 'katal, mol/s', {
+  row('kat', '1', amountFlow, namedUnits, 'katal, mol/s', {
     prefixes: 'all',
     words: ['katal'],
   }),
 
   // Pressure
-  row('bar', '1e5', pressure, `${brochure}, section 4; ${sp811}.8`, 'bar, 100 kPa', {
+  row('bar', '1e5', pressure, sp811, 'bar, 100 kPa', {
     prefixes: [...small, 'k'],
     words: ['bars', 'bara'],
   }),
   row('atm', '101325', pressure, '10th CGPM (1954), resolution 4', 'standard atmosphere, 101 325 Pa', {
     words: ['atmosphere', 'atmospheres'],
   }),
-  row('Torr', '101325 / 760', pressure, `${sp811}.8`, 'torr, 1/760 of the standard atmosphere', {
+  row('Torr', '101325 / 760', pressure, sp811, 'torr, 1/760 of the standard atmosphere', {
     prefixes: ['m', 'µ'],
     words: ['torr'],
   }),
-  row(
-    'mmHg',
-    '13.5951 * 9.80665',
-    pressure,
-    `${sp811}.8`,
-    'conventional millimetre of mercury, 13 595.1 kg/m³ at standard gravity',
-  ),
-  row('inHg', '25.4 * 13.5951 * 9.80665', pressure, `${sp811}.8`, 'conventional inch of mercury, 25.4 mmHg'),
-  row(
-    'psi',
-    '0.45359237 * 9.80665 / 0.0254 / 0.0254',
-    pressure,
-    `${sp811}.8; ${iyp}`,
-    'pound-force per square inch, absolute',
-    {},
-  ),
-  row(
-    'psia',
-    '0.45359237 * 9.80665 / 0.0254 / 0.0254',
-    pressure,
-    `${sp811}.8; ${iyp}`,
-    'pound-force per square inch, absolute',
-  ),
-  row(
-    'psig',
-    '0.45359237 * 9.80665 / 0.0254 / 0.0254',
-    pressure,
-    `${sp811}.8; ${iyp}`,
-    'pound-force per square inch above the ambient pressure',
-    {
-      kind: 'gauge',
-    },
-  ),
-  row('barg', '1e5', pressure, `${sp811}.8`, 'bar above the ambient pressure', { kind: 'gauge' }),
-  row('at', '98066.5', pressure, `${sp811}.8`, 'technical atmosphere, one kilogram-force per square centimetre'),
+  row('mmHg', '13.5951 * 9.80665', pressure, sp811, 'conventional millimetre of mercury, 133.322 Pa'),
+  row('inHg', '25.4 * 13.5951 * 9.80665', pressure, sp811, 'conventional inch of mercury, 25.4 mmHg'),
+  row('psi', poundPerSquareInch, pressure, poundForce, 'pound-force per square inch'),
+  row('psia', poundPerSquareInch, pressure, poundForce, 'pound-force per square inch, absolute'),
+  row('psig', poundPerSquareInch, pressure, poundForce, 'pound-force per square inch above ambient', { kind: 'gauge' }),
+  row('barg', '1e5', pressure, sp811, 'bar above the ambient pressure', { kind: 'gauge' }),
+  row('at', '98066.5', pressure, sp811, 'technical atmosphere, one kilogram-force per square centimetre'),
 
   // Volume, length, force, time
   row('L', '1e-3', volume, acceptedUnits, 'litre, dm³', {
@@ -170,15 +147,15 @@ export const units: readonly UnitRow[] = [
     prefixes: ['f', 'p', 'n', 'µ', 'm', 'c', 'd', 'h', 'k'],
     words: ['liter', 'litre', 'liters', 'litres', 'ltr'],
   }),
-  row('cc', '1e-6', volume, `${sp811}.8`, 'cubic centimetre', { words: ['ccm'] }),
-  row('Å', '1e-10', length, `${sp811}.8`, 'ångström, 0.1 nm', {
+  row('cc', '1e-6', volume, sp811, 'cubic centimetre', { words: ['ccm'] }),
+  row('Å', '1e-10', length, sp811, 'ångström, 0.1 nm', {
     aliases: ['\u212B', 'A\u030A', 'angstrom'],
     words: ['Angstrom', 'Ang'],
   }),
   row('in', '0.0254', length, iyp, 'inch, 25.4 mm', { prefixes: ['µ'], words: ['inch', 'inches'] }),
   row('mil', '2.54e-5', length, iyp, 'thousandth of an inch', { words: ['thou', 'mils'] }),
   row('ft', '0.3048', length, iyp, 'foot, 12 in', { words: ['foot', 'feet'] }),
-  row('dyn', '1e-5', force, `${sp811}.8`, 'dyne, g·cm/s²', { words: ['dyne', 'dynes'] }),
+  row('dyn', '1e-5', force, sp811, 'dyne, g·cm/s²', { words: ['dyne', 'dynes'] }),
   row('min', '60', time, acceptedUnits, 'minute', { words: ['minute', 'minutes', 'mins'] }),
   row('h', '3600', time, acceptedUnits, 'hour', { words: ['hr', 'hrs', 'hour', 'hours'] }),
   row('d', '86400', time, acceptedUnits, 'day', { words: ['day', 'days'] }),
@@ -190,74 +167,42 @@ export const units: readonly UnitRow[] = [
     aliases: ['degC'],
     words: ['celsius', 'Celsius', 'ºC', '℃'],
   }),
-  row('°F', '5 / 9', temperature, `${sp811}.8`, 'degree Fahrenheit, counted from 459.67 °R', {
+  row('°F', '5 / 9', temperature, sp811, 'degree Fahrenheit, counted from 459.67 °R', {
     kind: 'offset',
     zero: '459.67 * 5 / 9',
     aliases: ['degF'],
     words: ['fahrenheit', 'Fahrenheit', 'ºF', '℉'],
   }),
-  row('°R', '5 / 9', temperature, `${sp811}.8`, 'degree Rankine, absolute, 5/9 K', {
+  row('°R', '5 / 9', temperature, sp811, 'degree Rankine, absolute, 5/9 K', {
     aliases: ['degR'],
     words: ['rankine', 'Rankine'],
   }),
 
   // Amount of gas per time. What "standard" means is stated by the file.
-  row(
-    'sccm',
-    '1e-6 / 60',
-    multiplyDimensions(amount, perTime),
-    practice,
-    'standard cubic centimetre per minute, an amount of gas per time',
-    {
-      kind: 'standard-flow',
-    },
-  ),
-  row(
-    'slm',
-    '1e-3 / 60',
-    multiplyDimensions(amount, perTime),
-    practice,
-    'standard litre per minute, an amount of gas per time',
-    {
-      kind: 'standard-flow',
-      words: ['slpm', 'SLPM'],
-    },
-  ),
-  row(
-    'sccs',
-    '1e-6',
-    multiplyDimensions(amount, perTime),
-    practice,
-    'standard cubic centimetre per second, an amount of gas per time',
-    {
-      kind: 'standard-flow',
-    },
-  ),
+  row('sccm', '1e-6 / 60', amountFlow, practice, 'standard cubic centimetre per minute', { kind: 'standard-flow' }),
+  row('slm', '1e-3 / 60', amountFlow, practice, 'standard litre per minute', {
+    kind: 'standard-flow',
+    words: ['slpm', 'SLPM'],
+  }),
+  row('sccs', '1e-6', amountFlow, practice, 'standard cubic centimetre per second', { kind: 'standard-flow' }),
 
   // Energy
   row('eV', '1.602176634e-19', energy, codata, 'electronvolt', { prefixes: [...small, ...thousandUp, 'T'] }),
-  row('cal', '4.184', energy, `${sp811}.8`, 'thermochemical calorie, 4.184 J', { prefixes: ['k'], words: ['Cal'] }),
-  row('BTU', '1055.05585262', energy, `${sp811}.8`, 'British thermal unit, International Table'),
-  row('erg', '1e-7', energy, `${sp811}.8`, 'erg, dyn·cm', { words: ['ergs'] }),
+  row('cal', '4.184', energy, sp811, 'thermochemical calorie, 4.184 J', { prefixes: ['k'], words: ['Cal'] }),
+  row('BTU', '1055.05585262', energy, sp811, 'British thermal unit, International Table'),
+  row('erg', '1e-7', energy, sp811, 'erg, dyn·cm', { words: ['ergs'] }),
 
   // Molecules and amounts
   row('u', '1.66053906660e-27', mass, codata, 'unified atomic mass unit', { words: ['amu', 'Da', 'dalton'] }),
   row('lb', '0.45359237', mass, iyp, 'pound (mass)', { words: ['lbs', 'lbm', 'pound', 'pounds'] }),
   row('lbmol', '453.59237', amount, `${iyp}; as the mole to the gram`, 'pound-mole, 453.592 37 mol'),
-  row('P', '0.1', multiplyDimensions(pressure, time), `${sp811}.8`, 'poise, 0.1 Pa·s', {
+  row('P', '0.1', multiplyDimensions(pressure, time), sp811, 'poise, 0.1 Pa·s', {
     prefixes: ['c', 'm', 'µ'],
     words: ['poise', 'Poise'],
   }),
-  row(
-    'D',
-    '1e-21 / 299792458',
-    multiplyDimensions(charge, length),
-    `1e-18 statC·cm; ${codata}`,
-    'debye, 3.335 64e-30 C·m',
-    {
-      words: ['debye', 'Debye'],
-    },
-  ),
+  row('D', '1e-21 / 299792458', multiplyDimensions(charge, length), debye, 'debye, 3.335 64e-30 C·m', {
+    words: ['debye', 'Debye'],
+  }),
 
   // Plain numbers
   row('°', '3.14159265358979323846264338327950288 / 180', dimensionless, acceptedUnits, 'degree of angle', {
