@@ -18,7 +18,7 @@ export function startExtension(context: vscode.ExtensionContext, makeClient: Mak
     log,
     status,
     server.onDidChangeState((state) => showState(status, state)),
-    vscode.commands.registerCommand(commands.newFile, () => newFile(context.extensionUri)),
+    vscode.commands.registerCommand(commands.newFile, (wanted: unknown) => newFile(context.extensionUri, wanted)),
     vscode.commands.registerCommand(commands.toggleHints, () => toggleHints(context.globalState)),
     vscode.commands.registerCommand(commands.restartServer, () => restart(server, log)),
     vscode.commands.registerCommand(commands.showLog, () => log.show(true)),

@@ -5,14 +5,12 @@ interface Starter extends vscode.QuickPickItem {
   readonly file: string;
 }
 
-/** Offers the starters and opens the chosen one as an untitled document, so that nothing is written unasked. */
-export async function newFile(extensionUri: vscode.Uri): Promise<void> {
-  const starter = await vscode.window.showQuickPick(starters(), {
-    title: vscode.l10n.t('New gas-state file'),
-    placeHolder: vscode.l10n.t('Choose what to start from'),
-    matchOnDescription: true,
-    matchOnDetail: true,
-  });
+/**
+ * Opens a starter as an untitled document, so that nothing is written unasked. The walkthrough names the starter's
+ * file; otherwise the user is asked.
+ */
+export async function newFile(extensionUri: vscode.Uri, wanted?: unknown): Promise<void> {
+  const starter = starters().find(({ file }) => file === wanted) ?? (await askForStarter());
   if (starter === undefined) return;
   const bytes = await vscode.workspace.fs.readFile(
     vscode.Uri.joinPath(extensionUri, 'client', 'starters', starter.file),
@@ -20,6 +18,14 @@ export async function newFile(extensionUri: vscode.Uri): Promise<void> {
   const content = new TextDecoder().decode(bytes);
   const document = await vscode.workspace.openTextDocument({ language: 'tenuity', content });
   await vscode.window.showTextDocument(document);
+}
+
+function askForStarter(): Thenable<Starter | undefined> {
+  return vscode.window.showQuickPick(starters(), {
+    title: vscode.l10n.t('New gas-state file'),
+    placeHolder: vscode.l10n.t('Choose what to start from'),
+    matchOnDetail: true,
+  });
 }
 
 function starters(): readonly Starter[] {
