@@ -1,0 +1,199 @@
+/** A published work from which a number or a formula was taken. */
+export interface Source {
+  readonly authors: string;
+  readonly title: string;
+  readonly year: number;
+  /** Journal with volume and page, report number, or publisher. */
+  readonly published: string;
+  readonly doi?: string;
+}
+
+/** A number, or a set of numbers, with the work it comes from. Leaving out the source does not compile. */
+export interface Sourced<T> {
+  readonly value: T;
+  readonly source: SourceId;
+  /** Table, equation or page; "from memory" where it could not be looked up. */
+  readonly where?: string;
+  /** Relative expanded uncertainty, 95 %. */
+  readonly uncertainty?: number;
+}
+
+export type SourceId = keyof typeof sources;
+
+export const sources = {
+  'CODATA 2018': {
+    authors: 'Tiesinga, E.; Mohr, P. J.; Newell, D. B.; Taylor, B. N.',
+    title: 'CODATA recommended values of the fundamental physical constants: 2018',
+    year: 2021,
+    published: 'Rev. Mod. Phys. 93, 025010',
+    doi: '10.1103/RevModPhys.93.025010',
+  },
+  'CIAAW 2021': {
+    authors: 'Prohaska, T. et al.',
+    title: 'Standard atomic weights of the elements 2021 (IUPAC Technical Report)',
+    year: 2022,
+    published: 'Pure Appl. Chem. 94, 573',
+    doi: '10.1515/pac-2019-0603',
+  },
+  'Wang 2021': {
+    authors: 'Wang, M.; Huang, W. J.; Kondev, F. G.; Audi, G.; Naimi, S.',
+    title: 'The AME 2020 atomic mass evaluation (II)',
+    year: 2021,
+    published: 'Chin. Phys. C 45, 030003',
+    doi: '10.1088/1674-1137/abddaf',
+  },
+  'Lemmon 2000': {
+    authors: 'Lemmon, E. W.; Jacobsen, R. T.; Penoncello, S. G.; Friend, D. G.',
+    title: 'Thermodynamic properties of air and mixtures of nitrogen, argon, and oxygen from 60 to 2000 K',
+    year: 2000,
+    published: 'J. Phys. Chem. Ref. Data 29, 331',
+    doi: '10.1063/1.1285884',
+  },
+  'Lemmon & Jacobsen 2004': {
+    authors: 'Lemmon, E. W.; Jacobsen, R. T.',
+    title: 'Viscosity and thermal conductivity equations for nitrogen, oxygen, argon, and air',
+    year: 2004,
+    published: 'Int. J. Thermophys. 25, 21',
+    doi: '10.1023/B:IJOT.0000022327.04529.f3',
+  },
+  'IAPWS R12-08': {
+    authors: 'International Association for the Properties of Water and Steam',
+    title: 'Release on the IAPWS Formulation 2008 for the Viscosity of Ordinary Water Substance',
+    year: 2008,
+    published: 'IAPWS R12-08',
+  },
+  'Fenghour 1998': {
+    authors: 'Fenghour, A.; Wakeham, W. A.; Vesovic, V.',
+    title: 'The viscosity of carbon dioxide',
+    year: 1998,
+    published: 'J. Phys. Chem. Ref. Data 27, 31',
+    doi: '10.1063/1.556013',
+  },
+  'Muzny 2013': {
+    authors: 'Muzny, C. D.; Huber, M. L.; Kazakov, A. F.',
+    title: 'Correlation for the viscosity of normal hydrogen obtained from symbolic regression',
+    year: 2013,
+    published: 'J. Chem. Eng. Data 58, 969',
+    doi: '10.1021/je301273j',
+  },
+  'Quiñones-Cisneros 2012': {
+    authors: 'Quiñones-Cisneros, S. E.; Huber, M. L.; Deiters, U. K.',
+    title:
+      'Correlation for the viscosity of sulfur hexafluoride (SF6) from the triple point to 1000 K and pressures to 50 MPa',
+    year: 2012,
+    published: 'J. Phys. Chem. Ref. Data 41, 023102',
+    doi: '10.1063/1.3702441',
+  },
+  'Friend 1989': {
+    authors: 'Friend, D. G.; Ely, J. F.; Ingham, H.',
+    title: 'Thermophysical properties of methane',
+    year: 1989,
+    published: 'J. Phys. Chem. Ref. Data 18, 583',
+    doi: '10.1063/1.555828',
+  },
+  'Fenghour 1995': {
+    authors: 'Fenghour, A.; Wakeham, W. A.; Vesovic, V.; Watson, J. T. R.; Millat, J.; Vogel, E.',
+    title: 'The viscosity of ammonia',
+    year: 1995,
+    published: 'J. Phys. Chem. Ref. Data 24, 1649',
+    doi: '10.1063/1.555961',
+  },
+  'Svehla 1995': {
+    authors: 'Svehla, R. A.',
+    title: 'Transport coefficients for the NASA Lewis chemical equilibrium program',
+    year: 1995,
+    published: 'NASA TM-4647',
+  },
+  'Bich 1990': {
+    authors: 'Bich, E.; Millat, J.; Vogel, E.',
+    title:
+      'The viscosity and thermal conductivity of pure monatomic gases from their normal boiling point up to 5000 K',
+    year: 1990,
+    published: 'J. Phys. Chem. Ref. Data 19, 1289',
+    doi: '10.1063/1.555846',
+  },
+  'Boushehri 1987': {
+    authors: 'Boushehri, A.; Bzowski, J.; Kestin, J.; Mason, E. A.',
+    title: 'Equilibrium and transport properties of eleven polyatomic gases at low density',
+    year: 1987,
+    published: 'J. Phys. Chem. Ref. Data 16, 445',
+    doi: '10.1063/1.555800',
+  },
+  'Kestin 1984': {
+    authors: 'Kestin, J.; Knierim, K.; Mason, E. A.; Najafi, B.; Ro, S. T.; Waldman, M.',
+    title: 'Equilibrium and transport properties of the noble gases and their mixtures at low density',
+    year: 1984,
+    published: 'J. Phys. Chem. Ref. Data 13, 229',
+    doi: '10.1063/1.555703',
+  },
+  'Arp 1998': {
+    authors: 'Arp, V. D.; McCarty, R. D.; Friend, D. G.',
+    title: 'Thermophysical properties of helium-4 from 0.8 to 1500 K with pressures to 2000 MPa',
+    year: 1998,
+    published: 'NIST Technical Note 1334 (revised)',
+  },
+  'McBride 2002': {
+    authors: 'McBride, B. J.; Zehe, M. J.; Gordon, S.',
+    title: 'NASA Glenn coefficients for calculating thermodynamic properties of individual species',
+    year: 2002,
+    published: 'NASA/TP-2002-211556',
+  },
+  'Huber & Herzberg 1979': {
+    authors: 'Huber, K. P.; Herzberg, G.',
+    title: 'Molecular Spectra and Molecular Structure IV. Constants of Diatomic Molecules',
+    year: 1979,
+    published: 'Van Nostrand Reinhold',
+    doi: '10.1007/978-1-4757-0961-2',
+  },
+  'Svehla 1962': {
+    authors: 'Svehla, R. A.',
+    title: 'Estimated viscosities and thermal conductivities of gases at high temperatures',
+    year: 1962,
+    published: 'NASA TR R-132',
+  },
+  'Neufeld 1972': {
+    authors: 'Neufeld, P. D.; Janzen, A. R.; Aziz, R. A.',
+    title:
+      'Empirical equations to calculate 16 of the transport collision integrals Ω(l,s)* for the Lennard-Jones (12-6) potential',
+    year: 1972,
+    published: 'J. Chem. Phys. 57, 1100',
+    doi: '10.1063/1.1678363',
+  },
+  'Hirschfelder 1954': {
+    authors: 'Hirschfelder, J. O.; Curtiss, C. F.; Bird, R. B.',
+    title: 'Molecular Theory of Gases and Liquids',
+    year: 1954,
+    published: 'Wiley',
+  },
+  'Chapman & Cowling 1970': {
+    authors: 'Chapman, S.; Cowling, T. G.',
+    title: 'The Mathematical Theory of Non-Uniform Gases, 3rd ed.',
+    year: 1970,
+    published: 'Cambridge University Press',
+  },
+  'Mason & Saxena 1958': {
+    authors: 'Mason, E. A.; Saxena, S. C.',
+    title: 'Approximate formula for the thermal conductivity of gas mixtures',
+    year: 1958,
+    published: 'Phys. Fluids 1, 361',
+    doi: '10.1063/1.1724352',
+  },
+  'Poling 2001': {
+    authors: 'Poling, B. E.; Prausnitz, J. M.; O’Connell, J. P.',
+    title: 'The Properties of Gases and Liquids, 5th ed.',
+    year: 2001,
+    published: 'McGraw-Hill',
+  },
+  'CLP 2008': {
+    authors: 'European Parliament and Council',
+    title: 'Regulation (EC) No 1272/2008 on classification, labelling and packaging of substances and mixtures',
+    year: 2008,
+    published: 'Annex VI, table 3',
+  },
+  'OSHA HCS 2012': {
+    authors: 'Occupational Safety and Health Administration',
+    title: 'Hazard Communication Standard',
+    year: 2012,
+    published: '29 CFR 1910.1200',
+  },
+} as const satisfies Record<string, Source>;

@@ -1,0 +1,52 @@
+import type { Species } from './species';
+
+export const CH4: Species = {
+  formula: 'CH4',
+  names: ['methane'],
+  molarMass: { value: 16.043e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0002 },
+  viscosity: {
+    value: {
+      kind: 'cube-roots',
+      prefactor: 10.5e-6,
+      theta: 174,
+      coefficients: [
+        -3.0328138281, 16.918880086, -37.189364917, 41.288861858, -24.61592114, 8.9488430959, -1.8739245042,
+        0.2096610139, -9.6570437074e-3,
+      ],
+      low: 91,
+      high: 600,
+    },
+    source: 'Friend 1989',
+    where: 'dilute-gas viscosity; the place in the paper from memory',
+    uncertainty: 0.01,
+  },
+  heatCapacity: {
+    value: {
+      kind: 'nasa-9',
+      low: 200,
+      high: 6000,
+      intervals: [
+        {
+          high: 1000,
+          a: [-176685.0998, 2786.18102, -12.0257785, 0.0391761929, -3.61905443e-5, 2.026853043e-8, -4.97670549e-12],
+        },
+        {
+          high: 6000,
+          a: [3730042.76, -13835.01485, 20.49107091, -0.001961974759, 4.72731304e-7, -3.72881469e-11, 1.623737207e-15],
+        },
+      ],
+    },
+    source: 'McBride 2002',
+    where: 'table 1, methane, 200 to 6000 K',
+    uncertainty: 0.003,
+  },
+  lennardJones: {
+    value: { diameter: 3.758e-10, wellDepth: 148.6 },
+    source: 'Svehla 1962',
+    where: 'table I; from memory',
+  },
+  hazards: [
+    { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220' },
+    { value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' },
+  ],
+};

@@ -1,0 +1,53 @@
+import type { Species } from './species';
+
+export const CO: Species = {
+  formula: 'CO',
+  names: ['carbon monoxide'],
+  molarMass: { value: 28.01e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
+  viscosity: {
+    value: {
+      kind: 'exponential',
+      prefactor: 1e-7,
+      low: 200,
+      high: 5000,
+      pieces: [
+        { high: 1000, a: [0.60443938, -43.632704, -884.41949, 1.897215] },
+        { high: 5000, a: [0.65060585, 28.517449, -16690.236, 1.5223271] },
+      ],
+    },
+    source: 'Svehla 1995',
+    where: 'CO, fitted to Boushehri et al. 1987 below 1000 K',
+    uncertainty: 0.015,
+  },
+  heatCapacity: {
+    value: {
+      kind: 'nasa-9',
+      low: 200,
+      high: 6000,
+      intervals: [
+        {
+          high: 1000,
+          a: [14890.45326, -292.2285939, 5.72452717, -0.00817623503, 1.456903469e-5, -1.087746302e-8, 3.027941827e-12],
+        },
+        {
+          high: 6000,
+          a: [461919.725, -1944.704863, 5.91671418, -0.000566428283, 1.39881454e-7, -1.787680361e-11, 9.62093557e-16],
+        },
+      ],
+    },
+    source: 'McBride 2002',
+    where: 'table 1, carbon monoxide, 200 to 6000 K',
+    uncertainty: 0.003,
+  },
+  lennardJones: {
+    value: { diameter: 3.69e-10, wellDepth: 91.7 },
+    source: 'Svehla 1962',
+    where: 'table I; from memory',
+  },
+  hazards: [
+    { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220' },
+    { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331' },
+    { value: 'reproductive toxicity', source: 'CLP 2008', where: 'Repr. 1A, H360D' },
+    { value: 'specific target organ toxicity', source: 'CLP 2008', where: 'STOT RE 1, H372' },
+  ],
+};

@@ -1,0 +1,46 @@
+import type { Species } from './species';
+
+export const CO2: Species = {
+  formula: 'CO2',
+  names: ['carbon dioxide'],
+  molarMass: { value: 44.009e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
+  viscosity: {
+    value: {
+      kind: 'collision-integral',
+      prefactor: 1.00697e-6,
+      theta: 251.196,
+      coefficients: [0.235156, -0.491266, 5.211155e-2, 5.347906e-2, -1.537102e-2],
+      low: 200,
+      high: 1500,
+    },
+    source: 'Fenghour 1998',
+    where: 'eqs. 3 and 4, table 1',
+    uncertainty: 0.01,
+  },
+  heatCapacity: {
+    value: {
+      kind: 'nasa-9',
+      low: 200,
+      high: 6000,
+      intervals: [
+        {
+          high: 1000,
+          a: [49436.5054, -626.411601, 5.30172524, 0.002503813816, -2.127308728e-7, -7.68998878e-10, 2.849677801e-13],
+        },
+        {
+          high: 6000,
+          a: [117696.2419, -1788.791477, 8.29152319, -9.22315678e-5, 4.86367688e-9, -1.891053312e-12, 6.33003659e-16],
+        },
+      ],
+    },
+    source: 'McBride 2002',
+    where: 'table 1, carbon dioxide, 200 to 6000 K',
+    uncertainty: 0.003,
+  },
+  lennardJones: {
+    value: { diameter: 3.941e-10, wellDepth: 195.2 },
+    source: 'Svehla 1962',
+    where: 'table I; from memory',
+  },
+  hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
+};

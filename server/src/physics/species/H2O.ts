@@ -1,0 +1,46 @@
+import type { Species } from './species';
+
+export const H2O: Species = {
+  formula: 'H2O',
+  names: ['water vapour', 'water', 'steam'],
+  molarMass: { value: 18.015e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
+  viscosity: {
+    value: {
+      kind: 'inverse-powers',
+      prefactor: 1e-4,
+      theta: 647.096,
+      coefficients: [1.67752, 2.20462, 0.6366564, -0.241605],
+      low: 273.16,
+      high: 1173.15,
+    },
+    source: 'IAPWS R12-08',
+    where: 'eq. 11 and table 1',
+    uncertainty: 0.02,
+  },
+  heatCapacity: {
+    value: {
+      kind: 'nasa-9',
+      low: 200,
+      high: 6000,
+      intervals: [
+        {
+          high: 1000,
+          a: [-39479.6083, 575.573102, 0.931782653, 0.00722271286, -7.34255737e-6, 4.95504349e-9, -1.336933246e-12],
+        },
+        {
+          high: 6000,
+          a: [1034972.096, -2412.698562, 4.64611078, 0.002291998307, -6.83683048e-7, 9.42646893e-11, -4.82238053e-15],
+        },
+      ],
+    },
+    source: 'McBride 2002',
+    where: 'table 1, water vapour, 200 to 6000 K',
+    uncertainty: 0.003,
+  },
+  lennardJones: {
+    value: { diameter: 2.641e-10, wellDepth: 809.1 },
+    source: 'Svehla 1962',
+    where: 'table I; from memory',
+  },
+  hazards: [],
+};

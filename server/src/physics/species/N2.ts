@@ -1,0 +1,40 @@
+import { lemmonJacobsen } from './lemmonJacobsen';
+import type { Species } from './species';
+
+export const N2: Species = {
+  formula: 'N2',
+  names: ['nitrogen'],
+  molarMass: { value: 28.014e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
+  viscosity: {
+    value: lemmonJacobsen(28.01348, 0.3656, 98.94, { low: 70, high: 2000 }),
+    source: 'Lemmon & Jacobsen 2004',
+    where: 'eqs. 2 and 3, tables I and II',
+    uncertainty: 0.01,
+  },
+  heatCapacity: {
+    value: {
+      kind: 'nasa-9',
+      low: 200,
+      high: 6000,
+      intervals: [
+        {
+          high: 1000,
+          a: [22103.71497, -381.846182, 6.08273836, -0.00853091441, 1.384646189e-5, -9.62579362e-9, 2.519705809e-12],
+        },
+        {
+          high: 6000,
+          a: [587712.406, -2239.249073, 6.06694922, -0.00061396855, 1.491806679e-7, -1.923105485e-11, 1.061954386e-15],
+        },
+      ],
+    },
+    source: 'McBride 2002',
+    where: 'table 1, nitrogen, 200 to 6000 K',
+    uncertainty: 0.003,
+  },
+  lennardJones: {
+    value: { diameter: 3.798e-10, wellDepth: 71.4 },
+    source: 'Svehla 1962',
+    where: 'table I; from memory',
+  },
+  hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
+};

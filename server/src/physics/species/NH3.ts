@@ -1,0 +1,52 @@
+import { chapmanEnskogPrefactor } from '../transport/viscosityCorrelation';
+import type { Species } from './species';
+
+export const NH3: Species = {
+  formula: 'NH3',
+  names: ['ammonia'],
+  molarMass: { value: 17.031e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
+  viscosity: {
+    value: {
+      kind: 'collision-integral',
+      prefactor: chapmanEnskogPrefactor(2.1357, 17.03026, 0.2957),
+      theta: 386,
+      coefficients: [4.9931822, -0.61122364, 0, 0.18535124, -0.11160946],
+      low: 196,
+      high: 680,
+    },
+    source: 'Fenghour 1995',
+    where: 'eqs. 2 to 4; the printed prefactor lacks a factor of 100',
+    uncertainty: 0.02,
+  },
+  heatCapacity: {
+    value: {
+      kind: 'nasa-9',
+      low: 200,
+      high: 6000,
+      intervals: [
+        {
+          high: 1000,
+          a: [-76812.2615, 1270.951578, -3.89322913, 0.02145988418, -2.183766703e-5, 1.317385706e-8, -3.33232206e-12],
+        },
+        {
+          high: 6000,
+          a: [2452389.535, -8040.89424, 12.71346201, -0.000398018658, 3.55250275e-8, 2.53092357e-12, -3.32270053e-16],
+        },
+      ],
+    },
+    source: 'McBride 2002',
+    where: 'table 1, ammonia, 200 to 6000 K',
+    uncertainty: 0.003,
+  },
+  lennardJones: {
+    value: { diameter: 2.9e-10, wellDepth: 558.3 },
+    source: 'Svehla 1962',
+    where: 'table I; from memory',
+  },
+  hazards: [
+    { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 2, H221' },
+    { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331' },
+    { value: 'skin corrosion', source: 'CLP 2008', where: 'Skin Corr. 1B, H314' },
+    { value: 'hazardous to the aquatic environment', source: 'CLP 2008', where: 'Aquatic Acute 1, H400' },
+  ],
+};

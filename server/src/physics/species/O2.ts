@@ -1,0 +1,42 @@
+import { lemmonJacobsen } from './lemmonJacobsen';
+import type { Species } from './species';
+
+export const O2: Species = {
+  formula: 'O2',
+  names: ['oxygen'],
+  molarMass: { value: 31.998e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
+  viscosity: {
+    value: lemmonJacobsen(31.9988, 0.3428, 118.5, { low: 70, high: 2000 }),
+    source: 'Lemmon & Jacobsen 2004',
+    where: 'eqs. 2 and 3, tables I and II',
+    uncertainty: 0.015,
+  },
+  heatCapacity: {
+    value: {
+      kind: 'nasa-9',
+      low: 200,
+      high: 6000,
+      intervals: [
+        {
+          high: 1000,
+          a: [-34255.6342, 484.700097, 1.119010961, 0.00429388924, -6.83630052e-7, -2.0233727e-9, 1.039040018e-12],
+        },
+        {
+          high: 6000,
+          a: [
+            -1037939.022, 2344.830282, 1.819732036, 0.001267847582, -2.188067988e-7, 2.053719572e-11, -8.19346705e-16,
+          ],
+        },
+      ],
+    },
+    source: 'McBride 2002',
+    where: 'table 1, oxygen, 200 to 6000 K',
+    uncertainty: 0.003,
+  },
+  lennardJones: {
+    value: { diameter: 3.467e-10, wellDepth: 106.7 },
+    source: 'Svehla 1962',
+    where: 'table I; from memory',
+  },
+  hazards: [{ value: 'oxidising gas', source: 'CLP 2008', where: 'Ox. Gas 1, H270' }],
+};

@@ -1,0 +1,38 @@
+import type { Sourced } from '../sources';
+import type { HeatCapacity } from '../thermo/heatCapacity';
+import type { ViscosityCorrelation } from '../transport/viscosityCorrelation';
+
+/** One kind of molecule, or a blend treated as one, with what is known of it. What is missing is left out, never invented. */
+export interface Species {
+  /** The name it has in files, also its key: `N2`. */
+  readonly formula: string;
+  /** Common names, the usual one first. */
+  readonly names: readonly string[];
+  /** Molar mass, kg/mol. */
+  readonly molarMass: Sourced<number>;
+  readonly viscosity?: Sourced<ViscosityCorrelation>;
+  readonly heatCapacity?: Sourced<HeatCapacity>;
+  readonly lennardJones?: Sourced<LennardJones>;
+  readonly hazards: readonly Sourced<Hazard>[];
+  /** Mole fractions of what a blend consists of. */
+  readonly blend?: Sourced<Readonly<Record<string, number>>>;
+}
+
+/** The 12-6 potential V(r) = 4ε[(σ/r)¹² − (σ/r)⁶]. */
+export interface LennardJones {
+  /** σ, m. */
+  readonly diameter: number;
+  /** ε/k, K. */
+  readonly wellDepth: number;
+}
+
+/** Hazard classes by their GHS names; a simple asphyxiant is a class of the OSHA standard only. */
+export type Hazard =
+  | 'flammable gas'
+  | 'oxidising gas'
+  | 'acute toxicity, inhalation'
+  | 'reproductive toxicity'
+  | 'specific target organ toxicity'
+  | 'skin corrosion'
+  | 'hazardous to the aquatic environment'
+  | 'simple asphyxiant';

@@ -1,0 +1,67 @@
+import { isMonatomic } from '../transport/conductivity';
+import { heatCapacityRange } from '../thermo/heatCapacity';
+import type { Species } from '../species/species';
+import type { StateRequest } from './gasState';
+
+/** A relative error, 95 %, of a correlation or a method; its key names it among the factors of a trial. */
+export interface ModelError {
+  readonly key: string;
+  readonly relative: number;
+}
+
+/** Beyond the range of its data a correlation is taken to be uncertain by this much at least. */
+const beyondRange = 0.1;
+
+/** Of a correlation that states no uncertainty of its own. */
+const unstated = 0.05;
+
+/** The errors of the methods: our judgement from the comparisons that their sources print. */
+const methods = {
+  eucken: 0.1,
+  monatomic_conductivity: 0.005,
+  mixture_viscosity: 0.03,
+  mixture_conductivity: 0.06,
+  self_diffusion: 0.04,
+  pair_diffusion: 0.1,
+} as const;
+
+/** Every model error that stands behind the figures of a state. */
+export function modelErrors({ composition, point }: StateRequest): ModelError[] {
+  const { species } = composition;
+  const errors = species.flatMap((one) => [
+    ...viscosityError(one, point.temperature),
+    ...heatError(one, point.temperature),
+  ]);
+  const conducting = species.filter((one) => one.viscosity !== undefined && one.heatCapacity !== undefined);
+  if (conducting.some(isMonatomic)) errors.push(method('monatomic_conductivity'));
+  if (!conducting.every(isMonatomic)) errors.push(method('eucken'));
+  if (1 < species.length) {
+    errors.push(method('mixture_viscosity'), method('mixture_conductivity'), method('pair_diffusion'));
+  } else {
+    errors.push(method('self_diffusion'));
+  }
+  return errors;
+}
+
+function method(key: keyof typeof methods): ModelError {
+  return { key, relative: methods[key] };
+}
+
+function viscosityError({ formula, viscosity }: Species, T: number): ModelError[] {
+  if (viscosity === undefined) return [];
+  const stated = viscosity.uncertainty ?? unstated;
+  return [
+    { key: `viscosity:${formula}`, relative: within(viscosity.value, T) ? stated : Math.max(stated, beyondRange) },
+  ];
+}
+
+function heatError({ formula, heatCapacity }: Species, T: number): ModelError[] {
+  if (heatCapacity === undefined || heatCapacity.uncertainty === 0) return [];
+  const stated = heatCapacity.uncertainty ?? unstated;
+  const inside = within(heatCapacityRange(heatCapacity.value), T);
+  return [{ key: `heat_capacity:${formula}`, relative: inside ? stated : Math.max(stated, beyondRange) }];
+}
+
+function within({ low, high }: { readonly low: number; readonly high: number }, T: number): boolean {
+  return low <= T && T <= high;
+}

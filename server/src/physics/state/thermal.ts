@@ -1,0 +1,177 @@
+import { R } from '../constants';
+import type { Outcome } from '../outcome';
+import type { Species } from '../species/species';
+import { isMonatomic } from '../transport/conductivity';
+import type { GasState } from './gasState';
+import { map, map2 } from './gasState';
+import type { Method, StateProperty } from './property';
+import { ofSpecies } from './property';
+
+/* Heat capacities, sound, viscosity and conduction. Symbols: cp, cv molar heat capacities, M molar mass, ρ density. */
+
+const heat = { sources: [], restsOn: ['heat_capacity'] } as const;
+const idealGas = 'ideal gas, fitted heat capacity';
+const blended = { method: 'ideal gas, mean over molecules', sources: [] } as const;
+
+const ratio = (cp: number) => cp / (cp - R);
+const soundSpeed = (cp: number, M: number, T: number) => Math.sqrt((ratio(cp) * R * T) / M);
+
+const thermalDiffusivity = ({ conductivity, cp, density, molarMass }: GasState): Outcome<number> =>
+  map2(conductivity, cp, (lambda, heat) => (lambda * molarMass) / (density * heat));
+
+const eucken: Method = { method: 'modified Eucken', sources: ['Poling 2001'] };
+const monatomic: Method = {
+  method: 'first-order Chapman–Enskog, 15/4 R/M η, higher orders left out',
+  sources: ['Chapman & Cowling 1970'],
+};
+const masonSaxena: Method = {
+  method: 'Wassiljewa with Mason–Saxena coefficients',
+  sources: ['Mason & Saxena 1958', 'Poling 2001', 'Chapman & Cowling 1970'],
+};
+const conduction = (species: Species): Method => (isMonatomic(species) ? monatomic : eucken);
+
+/** A ratio with the conductivity in it has the conductivity's sources. */
+function throughConduction(method: string): Pick<StateProperty, 'method' | 'sources' | 'methodFor' | 'mixed'> {
+  return {
+    method,
+    sources: eucken.sources,
+    methodFor: (species) => ({ method, sources: conduction(species).sources }),
+    mixed: { method, sources: masonSaxena.sources },
+  };
+}
+
+export const thermalProperties: readonly StateProperty[] = [
+  {
+    name: 'heat_capacity_cp',
+    symbol: 'c_p',
+    quantityKind: 'heat_capacity',
+    perSpecies: true,
+    method: idealGas,
+    mixed: blended,
+    ...heat,
+    compute: ({ cp, molarMass }) => map(cp, (value) => value / molarMass),
+    computeFor: (one) => map(one.cp, (value) => value / one.species.molarMass.value),
+  },
+  {
+    name: 'heat_capacity_cv',
+    symbol: 'c_v',
+    quantityKind: 'heat_capacity',
+    perSpecies: true,
+    method: idealGas,
+    mixed: blended,
+    ...heat,
+    compute: ({ cp, molarMass }) => map(cp, (value) => (value - R) / molarMass),
+    computeFor: (one) => map(one.cp, (value) => (value - R) / one.species.molarMass.value),
+  },
+  {
+    name: 'molar_heat_capacity_cp',
+    symbol: 'C_p',
+    quantityKind: 'molar_heat_capacity',
+    perSpecies: true,
+    method: idealGas,
+    mixed: blended,
+    ...heat,
+    compute: ({ cp }) => cp,
+    computeFor: ({ cp }) => cp,
+  },
+  {
+    name: 'molar_heat_capacity_cv',
+    symbol: 'C_v',
+    quantityKind: 'molar_heat_capacity',
+    perSpecies: true,
+    method: idealGas,
+    mixed: blended,
+    ...heat,
+    compute: ({ cp }) => map(cp, (value) => value - R),
+    computeFor: ({ cp }) => map(cp, (value) => value - R),
+  },
+  {
+    name: 'heat_capacity_ratio',
+    symbol: 'γ',
+    quantityKind: 'number',
+    perSpecies: true,
+    method: 'C_p/C_v of the ideal gas',
+    ...heat,
+    compute: ({ cp }) => map(cp, ratio),
+    computeFor: ({ cp }) => map(cp, ratio),
+  },
+  {
+    name: 'sound_speed',
+    symbol: 'a',
+    quantityKind: 'speed',
+    perSpecies: true,
+    method: 'ideal gas, √(γRT/M)',
+    ...heat,
+    compute: ({ cp, molarMass, point }) => map(cp, (value) => soundSpeed(value, molarMass, point.temperature)),
+    computeFor: (one, { point }) =>
+      map(one.cp, (value) => soundSpeed(value, one.species.molarMass.value, point.temperature)),
+  },
+  {
+    name: 'viscosity',
+    symbol: 'η',
+    quantityKind: 'viscosity',
+    perSpecies: true,
+    method: 'dilute-gas correlation',
+    mixed: {
+      method: 'first-order Chapman–Enskog mixture, joined to the species’ own viscosities',
+      sources: ['Hirschfelder 1954', 'Neufeld 1972', 'Svehla 1962'],
+    },
+    sources: [],
+    restsOn: ['viscosity'],
+    compute: ({ viscosity }) => viscosity,
+    computeFor: ({ viscosity }) => viscosity,
+  },
+  {
+    name: 'kinematic_viscosity',
+    symbol: 'ν',
+    quantityKind: 'kinematic_viscosity',
+    perSpecies: false,
+    method: 'η/ρ',
+    sources: [],
+    restsOn: ['viscosity'],
+    compute: ({ viscosity, density }) => map(viscosity, (eta) => eta / density),
+  },
+  {
+    name: 'thermal_conductivity',
+    symbol: 'λ_T',
+    quantityKind: 'thermal_conductivity',
+    perSpecies: true,
+    ...eucken,
+    methodFor: conduction,
+    mixed: masonSaxena,
+    restsOn: ['viscosity', 'heat_capacity'],
+    compute: ({ conductivity }) => conductivity,
+    computeFor: ({ conductivity }) => conductivity,
+  },
+  {
+    name: 'thermal_diffusivity',
+    symbol: 'α',
+    quantityKind: 'diffusivity',
+    perSpecies: false,
+    ...throughConduction('λ/(ρ c_p)'),
+    restsOn: ['viscosity', 'heat_capacity'],
+    compute: thermalDiffusivity,
+  },
+  {
+    name: 'prandtl',
+    symbol: 'Pr',
+    quantityKind: 'number',
+    perSpecies: false,
+    ...throughConduction('η c_p/λ'),
+    restsOn: ['viscosity', 'heat_capacity'],
+    compute: ({ viscosity, conductivity, cp, molarMass }) =>
+      map2(
+        map2(viscosity, cp, (eta, heat) => (eta * heat) / molarMass),
+        conductivity,
+        (product, lambda) => product / lambda,
+      ),
+  },
+  {
+    ...ofSpecies('lewis', (one, state) => map2(thermalDiffusivity(state), one.diffusivity, (alpha, D) => alpha / D)),
+    symbol: 'Le',
+    quantityKind: 'number',
+    method: 'α/D',
+    sources: ['Hirschfelder 1954', 'Neufeld 1972'],
+    restsOn: ['viscosity', 'heat_capacity', 'pair_potential'],
+  },
+];

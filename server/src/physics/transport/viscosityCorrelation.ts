@@ -1,0 +1,97 @@
+/** How the dilute-gas viscosity of a species was correlated. Every form gives Pa s from K between `low` and `high`. */
+export type ViscosityCorrelation = { readonly low: number; readonly high: number } & Form;
+
+type Form =
+  /** η = C √T / exp Σ aᵢ (ln T/θ)ⁱ: a collision integral by a logarithmic series. */
+  | {
+      readonly kind: 'collision-integral';
+      readonly prefactor: number;
+      readonly theta: number;
+      readonly coefficients: readonly number[];
+    }
+  /** η = C √(T/θ) Σ cᵢ (T/θ)^((i−1)/3 − 1), i from 1: the reciprocal collision integral in cube roots. */
+  | {
+      readonly kind: 'cube-roots';
+      readonly prefactor: number;
+      readonly theta: number;
+      readonly coefficients: readonly number[];
+    }
+  /** η = C √(T/θ) / Σ Hᵢ (θ/T)ⁱ. */
+  | {
+      readonly kind: 'inverse-powers';
+      readonly prefactor: number;
+      readonly theta: number;
+      readonly coefficients: readonly number[];
+    }
+  /** η = Σ dᵢ (T/θ)^(i/4). */
+  | { readonly kind: 'fourth-roots'; readonly theta: number; readonly coefficients: readonly number[] }
+  /** η = C exp(A ln T + B/T + D/T² + E), piece by piece up to `high`. */
+  | { readonly kind: 'exponential'; readonly prefactor: number; readonly pieces: readonly ExponentialPiece[] }
+  /** η = C exp(c₀/x + c₁ + c₂x + c₃x² + …) with x = ln T. */
+  | { readonly kind: 'logarithmic'; readonly prefactor: number; readonly coefficients: readonly number[] }
+  /** One correlation below `from`, another above `to`, and between them the mean weighted evenly in ln T. */
+  | {
+      readonly kind: 'joined';
+      readonly cold: ViscosityCorrelation;
+      readonly warm: ViscosityCorrelation;
+      readonly from: number;
+      readonly to: number;
+    };
+
+export interface ExponentialPiece {
+  readonly high: number;
+  readonly a: readonly [number, number, number, number];
+}
+
+/**
+ * The prefactor C in η = C √T / Ω of a Chapman–Enskog form, Pa s K^(−1/2).
+ * `constant` as printed, for η in µPa s with M in g/mol and σ in nm.
+ */
+export function chapmanEnskogPrefactor(constant: number, molarMass: number, diameter: number): number {
+  return (1e-6 * constant * Math.sqrt(molarMass)) / (diameter * diameter);
+}
+
+/** The correlation as published, Pa s, for a temperature in K within its range. */
+export function correlatedViscosity(data: ViscosityCorrelation, T: number): number {
+  switch (data.kind) {
+    case 'collision-integral':
+      return (data.prefactor * Math.sqrt(T)) / Math.exp(polynomial(data.coefficients, Math.log(T / data.theta)));
+    case 'cube-roots': {
+      const root = Math.cbrt(T / data.theta);
+      return (data.prefactor * polynomial(data.coefficients, root)) / Math.sqrt(T / data.theta);
+    }
+    case 'inverse-powers':
+      return (data.prefactor * Math.sqrt(T / data.theta)) / polynomial(data.coefficients, data.theta / T);
+    case 'fourth-roots':
+      return polynomial(data.coefficients, Math.sqrt(Math.sqrt(T / data.theta)));
+    case 'exponential':
+      return data.prefactor * Math.exp(exponent(data.pieces, T));
+    case 'logarithmic': {
+      const x = Math.log(T);
+      return data.prefactor * Math.exp(polynomial(data.coefficients, x) / x);
+    }
+    case 'joined':
+      return joined(data.cold, data.warm, data.from, data.to, T);
+    default:
+      return data satisfies never;
+  }
+}
+
+function joined(cold: ViscosityCorrelation, warm: ViscosityCorrelation, from: number, to: number, T: number): number {
+  if (T <= from) return correlatedViscosity(cold, T);
+  if (to <= T) return correlatedViscosity(warm, T);
+  const weight = Math.log(T / from) / Math.log(to / from);
+  return (1 - weight) * correlatedViscosity(cold, T) + weight * correlatedViscosity(warm, T);
+}
+
+function exponent(pieces: readonly ExponentialPiece[], T: number): number {
+  const piece = pieces.find(({ high }) => T <= high) ?? pieces[pieces.length - 1];
+  if (piece === undefined) return 0;
+  const [a, b, c, d] = piece.a;
+  return a * Math.log(T) + (b + c / T) / T + d;
+}
+
+/** Σ cᵢ xⁱ. */
+function polynomial(coefficients: readonly number[], x: number): number {
+  return coefficients.reduceRight((sum, coefficient) => sum * x + coefficient, 0);
+}
