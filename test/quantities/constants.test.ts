@@ -1,16 +1,17 @@
 import assert from 'node:assert/strict';
+import type { ConstantName } from '../../server/src/quantities/constants';
 import { constantNamed, constants } from '../../server/src/quantities/constants';
 import { standardAmountPerVolume, standardReference } from '../../server/src/quantities/standardReference';
 import { unitFactor } from '../../server/src/quantities/conversion';
 import { unitOf } from '../../server/src/quantities/parseUnit';
 
-const valueOf = (name: Parameters<typeof constantNamed>[0]) => constantNamed(name)!.value;
+const valueOf = (name: ConstantName) => constantNamed(name).value;
 const close = (a: number, b: number, relative: number) =>
   assert.ok(Math.abs(a - b) <= relative * Math.abs(b), `${a} and ${b}`);
 
 describe('physical constants', () => {
   it('have the values that CODATA 2018 prints', () => {
-    const check = (name: Parameters<typeof constantNamed>[0], printed: string) => {
+    const check = (name: ConstantName, printed: string) => {
       const digits = printed.split('e')[0]!.replace(/[^\d]/g, '').length;
       // "…" in the list means truncated, not rounded.
       close(valueOf(name), Number(printed), 10 ** (1 - digits));
@@ -49,7 +50,7 @@ describe('physical constants', () => {
   });
 
   it('are found by name', () => {
-    assert.equal(constantNamed('k')?.title, 'Boltzmann constant');
+    assert.equal(constantNamed('k').title, 'Boltzmann constant');
     assert.equal(constantNamed('K' as string), undefined);
   });
 });

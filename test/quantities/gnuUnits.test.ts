@@ -136,8 +136,6 @@ const temperatures: [value: number, ours: string, theirs: string][] = [
 ];
 
 describe('units against GNU units', () => {
-  let problem: string | undefined;
-
   before(function () {
     const found = spawnSync('units', ['--version'], { encoding: 'utf8' });
     if (found.status === 0) return;

@@ -167,8 +167,8 @@ describe('any text', () => {
     fc.assert(
       fc.property(fc.oneof(nearlyUnit, fc.string({ unit: 'binary' }), fc.string({ maxLength: 400 })), (text) => {
         const result = parseUnit(text);
-        if (!result.ok) return inside(text, result.fault);
-        assert.ok(Number.isFinite(result.unit.factor) && result.unit.factor > 0);
+        if (result.ok) assert.ok(Number.isFinite(result.unit.factor) && result.unit.factor > 0);
+        else inside(text, result.fault);
       }),
       { numRuns: 3000 },
     );
@@ -188,7 +188,9 @@ describe('any text', () => {
     fc.assert(
       fc.property(product, (text) => {
         const result = parseUnit(text);
-        if (!result.ok) return fc.pre(false);
+        // A tower of powers can leave the range of doubles, which is a fault.
+        fc.pre(result.ok);
+        assert.ok(result.ok);
         const again = unitOf(result.unit.text);
         assert.equal(again.text, result.unit.text);
         assert.equal(again.dimension, result.unit.dimension);

@@ -15,6 +15,8 @@ const baseUnits = ['m', 'kg', 's', 'A', 'K', 'mol', 'cd'] as const;
 const writingOrder = [1, 0, 2, 3, 4, 5, 6];
 
 const interned = new Map<string, Dimension>();
+/** Evaluation asks for the same few products over and over. */
+const products = new Map<Dimension, Map<Dimension, Dimension>>();
 
 export const dimensionless = intern(bases.map(() => 0));
 
@@ -23,11 +25,15 @@ export function dimension(exponents: Partial<Record<BaseDimension, number>>): Di
 }
 
 export function multiplyDimensions(a: Dimension, b: Dimension): Dimension {
-  return intern(a.exponents.map((exponent, i) => exponent + (b.exponents[i] ?? 0)));
+  const known = products.get(a)?.get(b);
+  if (known) return known;
+  const product = intern(a.exponents.map((exponent, i) => exponent + (b.exponents[i] ?? 0)));
+  products.set(a, (products.get(a) ?? new Map<Dimension, Dimension>()).set(b, product));
+  return product;
 }
 
 export function divideDimensions(a: Dimension, b: Dimension): Dimension {
-  return intern(a.exponents.map((exponent, i) => exponent - (b.exponents[i] ?? 0)));
+  return multiplyDimensions(a, powerDimension(b, -1));
 }
 
 export function powerDimension(base: Dimension, exponent: number): Dimension {

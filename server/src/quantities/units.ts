@@ -66,7 +66,7 @@ const iyp = 'International yard and pound agreement (1959)';
 const poundForce = `${iyp}; standard gravity of the 3rd CGPM (1901)`;
 const debye = '1e-18 statC·cm, with the speed of light of the SI Brochure';
 const codata = 'CODATA 2018';
-const parts = 'ISO 80000-1:2009, 6.5.5';
+const parts = `${brochure}, 5.4.7`;
 const practice = 'common practice, no source';
 
 const poundPerSquareInch = '0.45359237 * 9.80665 / 0.0254 / 0.0254';
@@ -147,7 +147,7 @@ export const units: readonly UnitRow[] = [
     prefixes: ['f', 'p', 'n', 'µ', 'm', 'c', 'd', 'h', 'k'],
     words: ['liter', 'litre', 'liters', 'litres', 'ltr'],
   }),
-  row('cc', '1e-6', volume, sp811, 'cubic centimetre', { words: ['ccm'] }),
+  row('cc', '1e-6', volume, practice, 'cubic centimetre', { words: ['ccm'] }),
   row('Å', '1e-10', length, sp811, 'ångström, 0.1 nm', {
     aliases: ['\u212B', 'A\u030A', 'angstrom'],
     words: ['Angstrom', 'Ang'],
