@@ -178,6 +178,19 @@ export const sources = {
     published: 'Phys. Fluids 1, 361',
     doi: '10.1063/1.1724352',
   },
+  'Marrero & Mason 1972': {
+    authors: 'Marrero, T. R.; Mason, E. A.',
+    title: 'Gaseous diffusion coefficients',
+    year: 1972,
+    published: 'J. Phys. Chem. Ref. Data 1, 3',
+    doi: '10.1063/1.3253094',
+  },
+  'Nelson 1967': {
+    authors: 'Nelson, R. D.; Lide, D. R.; Maryott, A. A.',
+    title: 'Selected values of electric dipole moments for molecules in the gas phase',
+    year: 1967,
+    published: 'NSRDS-NBS 10',
+  },
   'Poling 2001': {
     authors: 'Poling, B. E.; Prausnitz, J. M.; O’Connell, J. P.',
     title: 'The Properties of Gases and Liquids, 5th ed.',

@@ -42,5 +42,6 @@ export const H2O: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  dipoleMoment: { value: 6.17e-30, source: 'Nelson 1967', where: '1.85 D; from memory' },
   hazards: [],
 };

@@ -43,6 +43,7 @@ export const NH3: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  dipoleMoment: { value: 4.9e-30, source: 'Nelson 1967', where: '1.47 D; from memory' },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 2, H221' },
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331' },

@@ -19,8 +19,11 @@ import type { Species } from './species';
 /** Every gas the program knows by itself. A new one needs its file, its line here, and its reference rows. */
 export const speciesList: readonly Species[] = [H2, D2, He, Ne, Ar, Kr, Xe, N2, O2, air, CO, CO2, H2O, CH4, NH3, SF6];
 
-const byFormula: ReadonlyMap<string, Species> = new Map(speciesList.map((species) => [species.formula, species]));
-
-export function speciesByFormula(formula: string): Species | undefined {
-  return byFormula.get(formula);
+/** A gas by its formula or by one of its common names. */
+export function speciesByName(name: string): Species | undefined {
+  return byName.get(name);
 }
+
+const byName: ReadonlyMap<string, Species> = new Map(
+  speciesList.flatMap((species) => [species.formula, ...species.names].map((name) => [name, species])),
+);

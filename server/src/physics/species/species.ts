@@ -13,6 +13,8 @@ export interface Species {
   readonly viscosity?: Sourced<ViscosityCorrelation>;
   readonly heatCapacity?: Sourced<HeatCapacity>;
   readonly lennardJones?: Sourced<LennardJones>;
+  /** Electric dipole moment, C m, of a polar molecule. */
+  readonly dipoleMoment?: Sourced<number>;
   readonly hazards: readonly Sourced<Hazard>[];
   /** Mole fractions of what a blend consists of. */
   readonly blend?: Sourced<Readonly<Record<string, number>>>;

@@ -1,17 +1,16 @@
 import type { Composition } from '../composition';
 import { meanMolarMass } from '../composition';
-import { k, N_A } from '../constants';
+import { k, N_A, R } from '../constants';
 import type { Note, Outcome } from '../outcome';
 import { failure, success } from '../outcome';
 import type { LennardJones, Species } from '../species/species';
 import { heatCapacityRange, molarHeatCapacity } from '../thermo/heatCapacity';
 import { conductivity, isMonatomic, mixtureConductivity } from '../transport/conductivity';
-import { diffusivityInMixture, selfDiffusivity } from '../transport/diffusion';
+import { diffusionInMixture, isMeasured, pairDiffusion, selfDiffusivity } from '../transport/diffusion';
 import { mixtureViscosity } from '../transport/mixtureViscosity';
 import type { Pairs } from '../transport/pairs';
 import { pairsOf } from '../transport/pairs';
 import { diameterOfViscosity, viscosity } from '../transport/viscosity';
-import { R } from '../constants';
 import type { StatePoint } from './closure';
 
 /** What a state is evaluated from. */
@@ -175,16 +174,22 @@ function diffusivity(
   point: StatePoint,
   trial: Trial,
 ): Outcome<number> {
-  const only = alone[0];
-  if (alone.length === 1 && only !== undefined) {
-    return map(only.viscosity, (eta) => {
-      const value = selfDiffusivity(only.species, eta, point.numberDensity, point.temperature);
+  const T = point.temperature;
+  const one = alone[i];
+  if (one === undefined) return failure({ kind: 'empty-composition' });
+  if (alone.length === 1) {
+    return map(one.viscosity, (eta) => {
+      const value = selfDiffusivity(one.species, eta, point.numberDensity, T);
       return factor(trial, 'self_diffusion') * value;
     });
   }
+  const { species, moleFractions } = composition;
   return map(pairs, (pair) => {
-    const value = diffusivityInMixture(i, composition.species, composition.moleFractions, pair, point.numberDensity);
-    return factor(trial, 'pair_diffusion') * value;
+    const row = species.map((other, j) => {
+      const method = i === j || !isMeasured(one.species, other, T) ? 'pair_diffusion' : 'measured_diffusion';
+      return factor(trial, method) * pairDiffusion(i, j, species, pair, T);
+    });
+    return diffusionInMixture(i, moleFractions, row) / point.numberDensity;
   });
 }
 

@@ -1,5 +1,6 @@
 import { h, k, R } from '../constants';
 import { success } from '../outcome';
+import { measuredDiffusionSource } from '../transport/measuredDiffusion';
 import type { GasState, SpeciesState } from './gasState';
 import { map, map2 } from './gasState';
 import type { StateProperty } from './property';
@@ -12,6 +13,8 @@ import { ofSpecies, overMolecules, total } from './property';
 
 const maxwell = { sources: ['Chapman & Cowling 1970'], restsOn: [] } as const;
 const spheres = { sources: ['Chapman & Cowling 1970'], restsOn: ['viscosity'] } as const;
+
+const pairDiffusionSources = [measuredDiffusionSource, 'Hirschfelder 1954', 'Neufeld 1972'] as const;
 
 const mostProbable = ({ mass }: SpeciesState, { point }: GasState) => Math.sqrt((2 * k * point.temperature) / mass);
 const rms = ({ mass }: SpeciesState, { point }: GasState) => Math.sqrt((3 * k * point.temperature) / mass);
@@ -166,8 +169,8 @@ export const kineticProperties: readonly StateProperty[] = [
     quantityKind: 'diffusivity',
     method: 'self-diffusion from the viscosity, D = 6/5 A* η/ρ',
     mixed: {
-      method: 'first-order Chapman–Enskog pair diffusion, Dᵢ = (1 − xᵢ)/Σⱼ xⱼ/Dᵢⱼ',
-      sources: ['Hirschfelder 1954', 'Neufeld 1972', 'Svehla 1962'],
+      method: 'pairs as measured, else first-order Chapman–Enskog; Dᵢ = (1 − xᵢ)/Σⱼ xⱼ/Dᵢⱼ',
+      sources: pairDiffusionSources,
     },
     sources: ['Hirschfelder 1954', 'Neufeld 1972'],
     restsOn: ['viscosity', 'pair_potential'],
@@ -179,6 +182,7 @@ export const kineticProperties: readonly StateProperty[] = [
     symbol: 'Sc',
     quantityKind: 'number',
     method: 'η/(ρD)',
+    mixed: { method: 'η/(ρDᵢ)', sources: pairDiffusionSources },
     sources: ['Hirschfelder 1954', 'Neufeld 1972'],
     restsOn: ['viscosity', 'pair_potential'],
   },

@@ -1,3 +1,5 @@
+import { isMeasured } from '../transport/diffusion';
+import { measuredError } from '../transport/measuredDiffusion';
 import { isMonatomic } from '../transport/conductivity';
 import { heatCapacityRange } from '../thermo/heatCapacity';
 import type { Species } from '../species/species';
@@ -22,7 +24,6 @@ const methods = {
   mixture_viscosity: 0.03,
   mixture_conductivity: 0.06,
   self_diffusion: 0.04,
-  pair_diffusion: 0.1,
 } as const;
 
 /** Every model error that stands behind the figures of a state. */
@@ -36,10 +37,25 @@ export function modelErrors({ composition, point }: StateRequest): ModelError[] 
   if (conducting.some(isMonatomic)) errors.push(method('monatomic_conductivity'));
   if (!conducting.every(isMonatomic)) errors.push(method('eucken'));
   if (1 < species.length) {
-    errors.push(method('mixture_viscosity'), method('mixture_conductivity'), method('pair_diffusion'));
+    errors.push(
+      method('mixture_viscosity'),
+      method('mixture_conductivity'),
+      ...diffusionErrors(species, point.temperature),
+    );
   } else {
     errors.push(method('self_diffusion'));
   }
+  return errors;
+}
+
+/** Pairs that are measured have an error of their own; among the others, polar molecules are the worst. */
+function diffusionErrors(species: readonly Species[], T: number): ModelError[] {
+  const pairs = species.flatMap((one, i) => species.slice(0, i).map((other) => ({ one, other })));
+  const estimated = pairs.filter(({ one, other }) => !isMeasured(one, other, T));
+  const polar = estimated.some(({ one, other }) => one.dipoleMoment !== undefined || other.dipoleMoment !== undefined);
+  const errors: ModelError[] = [];
+  if (estimated.length < pairs.length) errors.push({ key: 'measured_diffusion', relative: measuredError });
+  if (0 < estimated.length) errors.push({ key: 'pair_diffusion', relative: polar ? 0.25 : 0.1 });
   return errors;
 }
 

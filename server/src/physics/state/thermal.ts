@@ -170,8 +170,7 @@ export const thermalProperties: readonly StateProperty[] = [
     ...ofSpecies('lewis', (one, state) => map2(thermalDiffusivity(state), one.diffusivity, (alpha, D) => alpha / D)),
     symbol: 'Le',
     quantityKind: 'number',
-    method: 'α/D',
-    sources: ['Hirschfelder 1954', 'Neufeld 1972'],
+    ...throughConduction('α/D'),
     restsOn: ['viscosity', 'heat_capacity', 'pair_potential'],
   },
 ];

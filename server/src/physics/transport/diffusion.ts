@@ -1,6 +1,8 @@
-import { N_A } from '../constants';
+import { k, N_A } from '../constants';
 import type { Species } from '../species/species';
-import { aStar } from './collisionIntegrals';
+import { aStar, combined, omega11 } from './collisionIntegrals';
+import type { MeasuredPair } from './measuredDiffusion';
+import { measuredDiffusion, measuredPair, measuredRange } from './measuredDiffusion';
 import type { Pairs } from './pairs';
 import { reducedMass } from './pairs';
 
@@ -22,43 +24,56 @@ export function selfDiffusivity(
   return (1.2 * ratio * viscosity) / (numberDensity * (species.molarMass.value / N_A));
 }
 
+/** Whether the diffusion of a pair is measured at this temperature, or estimated from the potentials. */
+export function isMeasured(one: Species, other: Species, temperature: number): boolean {
+  const { low, high } = measuredRange;
+  return low <= temperature && temperature <= high && measuredPair(one.formula, other.formula) !== undefined;
+}
+
 /**
- * Diffusivity of species i in the mixture, m²/s: Dᵢ = (1 − xᵢ) / Σⱼ≠ᵢ xⱼ/Dᵢⱼ, which for two species is D₁₂.
+ * n Dᵢⱼ of two species, 1/(m s), which does not depend on pressure. `i` and `j` are their places among the pairs.
+ * Measured if it has been; beyond the measured range continued in proportion to the 12-6 potential; else estimated.
+ */
+export function pairDiffusion(i: number, j: number, species: readonly Species[], pairs: Pairs, T: number): number {
+  const one = species[i];
+  const other = species[j];
+  if (one === undefined || other === undefined) return 0;
+  const row = i === j ? undefined : measuredPair(one.formula, other.formula);
+  return row === undefined ? estimated(i * species.length + j, one, other, pairs) : measured(row, one, other, T);
+}
+
+/**
+ * Dᵢ = (1 − xᵢ) / Σⱼ≠ᵢ xⱼ/Dᵢⱼ, which for two species is D₁₂, from a row of pair diffusivities in any unit.
  * A species that is alone although others are named diffuses through itself.
  */
-export function diffusivityInMixture(
-  i: number,
-  species: readonly Species[],
-  x: readonly number[],
-  pairs: Pairs,
-  numberDensity: number,
-): number {
-  if (species.length === 2) return pairDiffusivity(0, 1, species, pairs, numberDensity);
+export function diffusionInMixture(i: number, x: readonly number[], row: readonly number[]): number {
+  if (x.length === 2) return row[1 - i] ?? 0;
   let others = 0;
   let resistance = 0;
   for (let j = 0; j < x.length; j++) {
     if (j === i) continue;
     others += x[j] ?? 0;
-    resistance += (x[j] ?? 0) / pairDiffusivity(i, j, species, pairs, numberDensity);
+    resistance += (x[j] ?? 0) / (row[j] ?? 0);
   }
-  return others === 0 ? pairDiffusivity(i, i, species, pairs, numberDensity) : others / resistance;
+  return others === 0 ? (row[i] ?? 0) : others / resistance;
 }
 
 /**
- * First-order Chapman–Enskog, m²/s (Hirschfelder, Curtiss & Bird 1954, eq. 8.2-44), written with the pair viscosity:
- * Dᵢⱼ = 3/5 Aᵢⱼ* ηᵢⱼ / (n μ), where μ is the reduced mass. For like molecules it is the self-diffusivity.
+ * First-order Chapman–Enskog (Hirschfelder, Curtiss & Bird 1954, eq. 8.2-44), written with the pair viscosity:
+ * n Dᵢⱼ = 3/5 Aᵢⱼ* ηᵢⱼ / μ, where μ is the reduced mass. For like molecules it is the self-diffusivity.
  */
-function pairDiffusivity(
-  i: number,
-  j: number,
-  species: readonly Species[],
-  pairs: Pairs,
-  numberDensity: number,
-): number {
-  const one = species[i];
-  const other = species[j];
-  if (one === undefined || other === undefined) return 0;
-  const cell = i * species.length + j;
-  const mass = reducedMass(one, other) / N_A;
-  return (0.6 * (pairs.aStar[cell] ?? 0) * (pairs.viscosity[cell] ?? 0)) / (numberDensity * mass);
+function estimated(cell: number, one: Species, other: Species, pairs: Pairs): number {
+  return (0.6 * (pairs.aStar[cell] ?? 0) * (pairs.viscosity[cell] ?? 0) * N_A) / reducedMass(one, other);
+}
+
+function measured(row: MeasuredPair, one: Species, other: Species, T: number): number {
+  const end = Math.min(Math.max(T, measuredRange.low), measuredRange.high);
+  const atEnd = measuredDiffusion(row, end) / (k * end);
+  return end === T ? atEnd : atEnd * (potentialDiffusion(one, other, T) / potentialDiffusion(one, other, end));
+}
+
+/** How n D of the 12-6 potential grows with temperature: √T / Ω(1,1)*. Without potentials, √T. */
+function potentialDiffusion(one: Species, other: Species, T: number): number {
+  if (one.lennardJones === undefined || other.lennardJones === undefined) return Math.sqrt(T);
+  return Math.sqrt(T) / omega11(T / combined(one.lennardJones.value, other.lennardJones.value).wellDepth);
 }
