@@ -13,7 +13,7 @@ const AFTERMATH = 2_000;
 /**
  * @param extension `{ folder, id }` of the extension to run
  * @param options `hostKind` 'node' or 'web'; `suite`, its built entry; `workspace`, the folder to open; `picture`, the
- *   file for a picture of the workbench when no results come
+ *   file for a picture of the workbench when something failed
  * @returns the results that the suite left: `[{ kind: 'passed' | 'failed' | 'skipped', title, … }]`
  */
 export async function runSuite(extension, { hostKind, suite, workspace, picture }) {
@@ -30,10 +30,12 @@ export async function runSuite(extension, { hostKind, suite, workspace, picture 
     const end = suiteEnd(host);
     await listen(host.page, { resultsFile, printed, end });
     await openSuite(host, extension.folder, { hostKind, suite });
-    return readResults(resultsFile, await end.promise);
+    const tests = readResults(resultsFile, await end.promise);
+    const failed = tests.findLast((test) => test.kind === 'failed');
+    if (failed) failed.message += await gatherEvidence(host, { printed, picture });
+    return tests;
   } catch (error) {
-    await host?.page.screenshot({ path: picture }).catch(() => {});
-    error.message += `\n--- VS Code's server\n${host?.server.log.text()}\n--- console\n${printed.join('\n')}`;
+    error.message += await gatherEvidence(host, { printed, picture });
     throw error;
   } finally {
     await host?.stop();
@@ -65,7 +67,7 @@ async function listen(page, { resultsFile, printed, end }) {
     const text = format(...args);
     // A web worker has neither files nor an environment: its suite prints the results as one marked line.
     if (text.startsWith(MARK)) fs.writeFileSync(resultsFile, text.slice(MARK.length));
-    else printed.push(`${type}: ${withoutOwnFrames(text)}`);
+    else if (type !== 'info') printed.push(`${type}: ${withoutOwnFrames(text)}`);
   });
 }
 
@@ -89,6 +91,11 @@ function readResults(file, trouble) {
   if (tests.length === 0) throw new Error('the suite has no test');
   if (trouble && tests.every((test) => test.kind === 'passed')) throw new Error(`all tests passed, but ${trouble}`);
   return tests;
+}
+
+async function gatherEvidence(host, { printed, picture }) {
+  await host?.page.screenshot({ path: picture }).catch(() => {});
+  return `\n--- VS Code's server\n${host?.log()}\n--- console\n${printed.join('\n')}\n--- picture: ${picture}`;
 }
 
 /** Less VS Code's own stack frames. */

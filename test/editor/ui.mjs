@@ -7,6 +7,7 @@ import { startHost } from '../vscode/host.mjs';
 import * as workbench from './workbench.mjs';
 
 const STEP_LIMIT = 30_000;
+const PACKAGE_LIMIT = 1_000_000;
 const FAULT = { line: 'pressure = 3', word: 'mm' };
 const NAME = { line: 'state backing', word: 'backing' };
 const PRESSURE = /pressure\s=\s3\s([µmhkM]?(Pa|bar|Torr)|mmHg|inHg|atm|at|psia?)(?!\w)/;
@@ -30,9 +31,9 @@ export async function driveByHand(vsix, { workspace, pictures }) {
   const picture = (name) => host.page.screenshot({ path: path.join(pictures, `${name}.png`) });
   host.page.setDefaultTimeout(STEP_LIMIT);
   try {
-    return await take(steps(host, picture), async (error) => {
+    return await take(steps(host, { vsix, picture }), async (error) => {
       await picture('failure').catch(() => {});
-      return `${error.stack}\n--- VS Code's server\n${host.server.log.text()}`;
+      return `${error.stack}\n--- VS Code's server\n${host.log()}`;
     });
   } finally {
     await host.stop();
@@ -54,13 +55,16 @@ async function take(list, describe) {
   return results;
 }
 
-function steps({ page, folder, scratch, url, strangers }, picture) {
+function steps({ page, folder, scratch, url, strangers }, { vsix, picture }) {
   const problem = page.locator('.markers-panel .monaco-list-row', { hasText: 'unit-mismatch' });
   const fixed = workbench.editor(page).locator('.view-line', { hasText: PRESSURE });
   return [
     [
-      'is packed with all that it names and nothing else',
-      () => checkInstalled(path.join(scratch, 'server/extensions')),
+      'is packed with all that it names and nothing else, in less than 1 MB',
+      () => {
+        checkInstalled(path.join(scratch, 'server/extensions'));
+        assert.ok(fs.statSync(vsix).size < PACKAGE_LIMIT, `the package has ${fs.statSync(vsix).size} bytes`);
+      },
     ],
     [
       'opens a record as a gas-state file',
@@ -130,7 +134,7 @@ function checkInstalled(extensions) {
   assert.deepEqual(missing, []);
   const packed = fs
     .readdirSync(folder, { recursive: true })
-    .filter((file) => /\.(map|ts|mjs|peggy)$|peggy|node_modules/.test(file));
+    .filter((file) => /\.(map|ts|mjs)$|peggy|node_modules/.test(file));
   assert.deepEqual(packed, []);
 }
 

@@ -31,6 +31,8 @@ export async function startHost(workspace, { extension, settings, env, screen })
     return {
       page,
       server,
+      /** What VS Code's server and the extension have logged. */
+      log: () => [server.log.text(), ...extensionLogs(scratch.folder)].join('\n'),
       folder,
       scratch: scratch.folder,
       strangers: watchStrangers(page),
@@ -59,4 +61,12 @@ function watchStrangers(page) {
   page.on('request', (request) => note(request.url()));
   page.on('websocket', (socket) => note(socket.url()));
   return strangers;
+}
+
+/** What the extension wrote to its Output channels; a web extension's are not on disk. */
+function extensionLogs(scratch) {
+  const logs = path.join(scratch, 'server/data/logs');
+  if (!fs.existsSync(logs)) return [];
+  const files = fs.readdirSync(logs, { recursive: true }).filter((file) => /Gas State.*\.log$/.test(file));
+  return files.map((file) => `--- ${path.basename(file)}\n${fs.readFileSync(path.join(logs, file), 'utf8')}`);
 }
