@@ -66,7 +66,7 @@ export type Note =
     };
 
 /** The sorts of data that a species may have or lack. */
-export type DataKind = 'viscosity' | 'heat_capacity' | 'pair_potential';
+export type DataKind = 'viscosity' | 'conductivity' | 'heat_capacity' | 'pair_potential';
 
 const noNotes: readonly Note[] = [];
 

@@ -62,6 +62,36 @@ export const sources = {
     year: 2008,
     published: 'IAPWS R12-08',
   },
+  'IAPWS R15-11': {
+    authors: 'International Association for the Properties of Water and Steam',
+    title: 'Release on the IAPWS Formulation 2011 for the Thermal Conductivity of Ordinary Water Substance',
+    year: 2011,
+    published: 'IAPWS R15-11',
+  },
+  'Huber 2016': {
+    authors: 'Huber, M. L.; Sykioti, E. A.; Assael, M. J.; Perkins, R. A.',
+    title:
+      'Reference correlation of the thermal conductivity of carbon dioxide from the triple point to 1100 K and up to 200 MPa',
+    year: 2016,
+    published: 'J. Phys. Chem. Ref. Data 45, 013102',
+    doi: '10.1063/1.4940892',
+  },
+  'Assael 2011': {
+    authors: 'Assael, M. J.; Assael, J.-A. M.; Huber, M. L.; Perkins, R. A.; Takata, Y.',
+    title:
+      'Correlation of the thermal conductivity of normal and parahydrogen from the triple point to 1000 K and up to 100 MPa',
+    year: 2011,
+    published: 'J. Phys. Chem. Ref. Data 40, 033101',
+    doi: '10.1063/1.3606499',
+  },
+  'Monogenidou 2018': {
+    authors: 'Monogenidou, S. A.; Assael, M. J.; Huber, M. L.',
+    title:
+      'Reference correlation for the thermal conductivity of ammonia from the triple-point temperature to 680 K and pressures up to 80 MPa',
+    year: 2018,
+    published: 'J. Phys. Chem. Ref. Data 47, 043101',
+    doi: '10.1063/1.5053087',
+  },
   'Fenghour 1998': {
     authors: 'Fenghour, A.; Wakeham, W. A.; Vesovic, V.',
     title: 'The viscosity of carbon dioxide',

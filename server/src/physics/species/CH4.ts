@@ -20,6 +20,18 @@ export const CH4: Species = {
     where: 'dilute-gas viscosity; the place in the paper from memory',
     uncertainty: 0.01,
   },
+  conductivity: {
+    value: {
+      kind: 'exponential',
+      prefactor: 1e-4,
+      low: 200,
+      high: 1000,
+      pieces: [{ high: 1000, a: [1.0238177, -310.92375, 32944.309, 0.67787437] }],
+    },
+    source: 'Svehla 1995',
+    where: 'CH4',
+    uncertainty: 0.03,
+  },
   heatCapacity: {
     value: {
       kind: 'nasa-9',

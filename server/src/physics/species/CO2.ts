@@ -17,6 +17,19 @@ export const CO2: Species = {
     where: 'eqs. 3 and 4, table 1',
     uncertainty: 0.01,
   },
+  conductivity: {
+    value: {
+      kind: 'inverse-powers',
+      prefactor: 1e-3,
+      theta: 304.1282,
+      coefficients: [1.51874307e-2, 2.8067404e-2, 2.2856419e-2, -7.4162421e-3],
+      low: 200,
+      high: 1100,
+    },
+    source: 'Huber 2016',
+    where: 'eq. 3, table 3',
+    uncertainty: 0.02,
+  },
   heatCapacity: {
     value: {
       kind: 'nasa-9',

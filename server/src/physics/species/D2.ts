@@ -1,4 +1,4 @@
-import { chapmanEnskogPrefactor } from '../transport/viscosityCorrelation';
+import { chapmanEnskogPrefactor } from '../transport/correlation';
 import type { Species } from './species';
 
 /** Normal deuterium: two thirds ortho, one third para. */

@@ -1,4 +1,4 @@
-import { chapmanEnskogPrefactor } from '../transport/viscosityCorrelation';
+import { chapmanEnskogPrefactor } from '../transport/correlation';
 import type { Species } from './species';
 
 /** Normal hydrogen: three quarters ortho, one quarter para. */
@@ -18,6 +18,20 @@ export const H2: Species = {
     source: 'Muzny 2013',
     where: 'eqs. 3 and 4, table 2',
     uncertainty: 0.01,
+  },
+  conductivity: {
+    value: {
+      kind: 'ratio',
+      prefactor: 1,
+      theta: 33.145,
+      numerator: [-0.340976, 4.5882, -1.4508, 0.326394, 3.16939e-3, 1.90592e-4, -1.139e-6],
+      denominator: [138.497, -22.1878, 4.57151, 1],
+      low: 20,
+      high: 1000,
+    },
+    source: 'Assael 2011',
+    where: 'normal hydrogen, dilute-gas term',
+    uncertainty: 0.03,
   },
   heatCapacity: {
     value: {

@@ -17,6 +17,19 @@ export const H2O: Species = {
     where: 'eq. 11 and table 1',
     uncertainty: 0.02,
   },
+  conductivity: {
+    value: {
+      kind: 'inverse-powers',
+      prefactor: 1e-3,
+      theta: 647.096,
+      coefficients: [2.443221e-3, 1.323095e-2, 6.770357e-3, -3.454586e-3, 4.096266e-4],
+      low: 273.16,
+      high: 1173.15,
+    },
+    source: 'IAPWS R15-11',
+    where: 'eq. 16, table 1',
+    uncertainty: 0.02,
+  },
   heatCapacity: {
     value: {
       kind: 'nasa-9',

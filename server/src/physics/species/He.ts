@@ -1,7 +1,7 @@
-import type { ViscosityCorrelation } from '../transport/viscosityCorrelation';
+import type { Correlation } from '../transport/correlation';
 import type { Species } from './species';
 
-const cold: ViscosityCorrelation = {
+const cold: Correlation = {
   kind: 'logarithmic',
   prefactor: 1e-7,
   coefficients: [-0.135311743, 1.00347841, 1.20654649, -0.149564551, 0.012520841],
@@ -9,7 +9,7 @@ const cold: ViscosityCorrelation = {
   high: 100,
 };
 
-const warm: ViscosityCorrelation = {
+const warm: Correlation = {
   kind: 'exponential',
   prefactor: 1e-7,
   low: 200,

@@ -1,15 +1,26 @@
-import { lemmonJacobsen } from './lemmonJacobsen';
+import { lemmonJacobsen, lemmonJacobsenConductivity } from './lemmonJacobsen';
 import type { Species } from './species';
+
+const viscosity = lemmonJacobsen(28.01348, 0.3656, 98.94, { low: 70, high: 2000 });
 
 export const N2: Species = {
   formula: 'N2',
   names: ['nitrogen'],
   molarMass: { value: 28.014e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
   viscosity: {
-    value: lemmonJacobsen(28.01348, 0.3656, 98.94, { low: 70, high: 2000 }),
+    value: viscosity,
     source: 'Lemmon & Jacobsen 2004',
     where: 'eqs. 2 and 3, tables I and II',
     uncertainty: 0.01,
+  },
+  conductivity: {
+    value: lemmonJacobsenConductivity(viscosity, 126.192, 1.511, [
+      { n: 2.117, t: -1 },
+      { n: -3.332, t: -0.7 },
+    ]),
+    source: 'Lemmon & Jacobsen 2004',
+    where: 'eq. 5, table III',
+    uncertainty: 0.02,
   },
   heatCapacity: {
     value: {

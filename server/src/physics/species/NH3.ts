@@ -1,4 +1,4 @@
-import { chapmanEnskogPrefactor } from '../transport/viscosityCorrelation';
+import { chapmanEnskogPrefactor } from '../transport/correlation';
 import type { Species } from './species';
 
 export const NH3: Species = {
@@ -17,6 +17,20 @@ export const NH3: Species = {
     source: 'Fenghour 1995',
     where: 'eqs. 2 to 4; the printed prefactor lacks a factor of 100',
     uncertainty: 0.02,
+  },
+  conductivity: {
+    value: {
+      kind: 'ratio',
+      prefactor: 1e-3,
+      theta: 405.56,
+      numerator: [86.9294, -170.5502, 608.0287, -100.9764, 85.1986],
+      denominator: [4.68994, 9.21307, -1.53637, 1],
+      low: 196,
+      high: 680,
+    },
+    source: 'Monogenidou 2018',
+    where: 'dilute-gas term',
+    uncertainty: 0.03,
   },
   heatCapacity: {
     value: {

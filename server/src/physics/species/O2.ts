@@ -1,15 +1,26 @@
-import { lemmonJacobsen } from './lemmonJacobsen';
+import { lemmonJacobsen, lemmonJacobsenConductivity } from './lemmonJacobsen';
 import type { Species } from './species';
+
+const viscosity = lemmonJacobsen(31.9988, 0.3428, 118.5, { low: 70, high: 2000 });
 
 export const O2: Species = {
   formula: 'O2',
   names: ['oxygen'],
   molarMass: { value: 31.998e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 0.0001 },
   viscosity: {
-    value: lemmonJacobsen(31.9988, 0.3428, 118.5, { low: 70, high: 2000 }),
+    value: viscosity,
     source: 'Lemmon & Jacobsen 2004',
     where: 'eqs. 2 and 3, tables I and II',
     uncertainty: 0.015,
+  },
+  conductivity: {
+    value: lemmonJacobsenConductivity(viscosity, 154.581, 1.036, [
+      { n: 6.283, t: -0.9 },
+      { n: -4.262, t: -0.6 },
+    ]),
+    source: 'Lemmon & Jacobsen 2004',
+    where: 'eq. 5, table III',
+    uncertainty: 0.02,
   },
   heatCapacity: {
     value: {

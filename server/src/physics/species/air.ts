@@ -1,5 +1,7 @@
-import { lemmonJacobsen } from './lemmonJacobsen';
+import { lemmonJacobsen, lemmonJacobsenConductivity } from './lemmonJacobsen';
 import type { Species } from './species';
+
+const viscosity = lemmonJacobsen(28.9586, 0.36, 103.3, { low: 70, high: 2000 });
 
 /** Dry air as if it were one gas, after the composition for which its viscosity was correlated. */
 export const air: Species = {
@@ -7,10 +9,19 @@ export const air: Species = {
   names: ['air', 'dry air'],
   molarMass: { value: 28.9586e-3, source: 'Lemmon 2000', where: 'table 3, the composition below', uncertainty: 0.0001 },
   viscosity: {
-    value: lemmonJacobsen(28.9586, 0.36, 103.3, { low: 70, high: 2000 }),
+    value: viscosity,
     source: 'Lemmon & Jacobsen 2004',
     where: 'eqs. 2 and 3, tables I and II',
     uncertainty: 0.01,
+  },
+  conductivity: {
+    value: lemmonJacobsenConductivity(viscosity, 132.6312, 1.308, [
+      { n: 1.405, t: -1.1 },
+      { n: -1.036, t: -0.3 },
+    ]),
+    source: 'Lemmon & Jacobsen 2004',
+    where: 'eq. 5, table III',
+    uncertainty: 0.02,
   },
   heatCapacity: {
     value: {

@@ -1,6 +1,6 @@
 import type { Sourced } from '../sources';
 import type { HeatCapacity } from '../thermo/heatCapacity';
-import type { ViscosityCorrelation } from '../transport/viscosityCorrelation';
+import type { Correlation } from '../transport/correlation';
 
 /** One kind of molecule, or a blend treated as one, with what is known of it. What is missing is left out, never invented. */
 export interface Species {
@@ -10,7 +10,9 @@ export interface Species {
   readonly names: readonly string[];
   /** Molar mass, kg/mol. */
   readonly molarMass: Sourced<number>;
-  readonly viscosity?: Sourced<ViscosityCorrelation>;
+  readonly viscosity?: Sourced<Correlation>;
+  /** Where it is left out, the conductivity follows from viscosity and heat capacity. */
+  readonly conductivity?: Sourced<Correlation>;
   readonly heatCapacity?: Sourced<HeatCapacity>;
   readonly lennardJones?: Sourced<LennardJones>;
   /** Electric dipole moment, C m, of a polar molecule. */

@@ -71,7 +71,9 @@ const covolumeLimit = 0.01;
 function notesOf(state: GasState): readonly Note[] {
   const notes: Note[] = [];
   for (const one of state.species) {
-    notes.push(...(one.viscosity.ok ? one.viscosity.notes : []), ...(one.cp.ok ? one.cp.notes : []));
+    for (const data of [one.viscosity, one.conductivity, one.cp]) {
+      if (data.ok) notes.push(...data.notes.filter((note) => !notes.includes(note)));
+    }
     const wavelength = h / Math.sqrt(2 * Math.PI * one.mass * k * state.point.temperature);
     const degeneracy = one.numberDensity * wavelength ** 3;
     if (degeneracyLimit < degeneracy) {

@@ -5,7 +5,12 @@ import type { Note, Outcome } from '../outcome';
 import { failure, success } from '../outcome';
 import type { LennardJones, Species } from '../species/species';
 import { heatCapacityRange, molarHeatCapacity } from '../thermo/heatCapacity';
-import { conductivity, isMonatomic, mixtureConductivity } from '../transport/conductivity';
+import {
+  conductionMethod,
+  correlatedConductivity,
+  kineticConductivity,
+  mixtureConductivity,
+} from '../transport/conductivity';
 import { diffusionInMixture, isMeasured, pairDiffusion, selfDiffusivity } from '../transport/diffusion';
 import { mixtureViscosity } from '../transport/mixtureViscosity';
 import type { Pairs } from '../transport/pairs';
@@ -121,7 +126,6 @@ function aloneState(species: Species, moleFraction: number, request: StateReques
   const mass = species.molarMass.value / N_A;
   const eta = map(viscosity(species, T), (value) => value * factor(trial, `viscosity:${species.formula}`));
   const cp = heatCapacity(species, T, trial);
-  const method = isMonatomic(species) ? 'monatomic_conductivity' : 'eucken';
   return {
     species,
     moleFraction,
@@ -130,7 +134,7 @@ function aloneState(species: Species, moleFraction: number, request: StateReques
     meanSpeed: Math.sqrt((8 * k * T) / (Math.PI * mass)),
     cp,
     viscosity: eta,
-    conductivity: map2(eta, cp, (value, heat) => factor(trial, method) * conductivity(species, value, heat - R)),
+    conductivity: conductivity(species, eta, cp, T, trial),
     diameter: diameter(species, eta, request),
   };
 }
@@ -143,6 +147,22 @@ function heatCapacity(species: Species, T: number, trial: Trial): Outcome<number
   if (low <= T && T <= high) return success(value);
   const range = { quantity: 'temperature', value: T, low, high } as const;
   return success(value, [{ kind: 'outside-range', ...range, property: 'heat_capacity', species: species.formula }]);
+}
+
+function conductivity(
+  species: Species,
+  eta: Outcome<number>,
+  cp: Outcome<number>,
+  T: number,
+  trial: Trial,
+): Outcome<number> {
+  const method = conductionMethod(species);
+  if (method === 'correlation') {
+    const scale = factor(trial, `conductivity:${species.formula}`);
+    return map(correlatedConductivity(species, T), (value) => value * scale);
+  }
+  const scale = factor(trial, method === 'eucken' ? 'eucken' : 'monatomic_conductivity');
+  return map2(eta, cp, (value, heat) => scale * kineticConductivity(species, value, heat - R));
 }
 
 function diameter(species: Species, eta: Outcome<number>, request: StateRequest): Outcome<number> {

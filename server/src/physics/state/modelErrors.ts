@@ -1,6 +1,8 @@
 import { isMeasured } from '../transport/diffusion';
 import { measuredError } from '../transport/measuredDiffusion';
-import { isMonatomic } from '../transport/conductivity';
+import type { Sourced } from '../sources';
+import { conductionMethod } from '../transport/conductivity';
+import type { Correlation } from '../transport/correlation';
 import { heatCapacityRange } from '../thermo/heatCapacity';
 import type { Species } from '../species/species';
 import type { StateRequest } from './gasState';
@@ -18,7 +20,7 @@ const beyondRange = 0.1;
 const unstated = 0.05;
 
 /** The errors of the methods: our judgement from the comparisons that their sources print. */
-const methods = {
+const methodErrors = {
   eucken: 0.1,
   monatomic_conductivity: 0.005,
   mixture_viscosity: 0.03,
@@ -30,12 +32,14 @@ const methods = {
 export function modelErrors({ composition, point }: StateRequest): ModelError[] {
   const { species } = composition;
   const errors = species.flatMap((one) => [
-    ...viscosityError(one, point.temperature),
+    ...correlationError('viscosity', one.formula, one.viscosity, point.temperature),
+    ...correlationError('conductivity', one.formula, one.conductivity, point.temperature),
     ...heatError(one, point.temperature),
   ]);
   const conducting = species.filter((one) => one.viscosity !== undefined && one.heatCapacity !== undefined);
-  if (conducting.some(isMonatomic)) errors.push(method('monatomic_conductivity'));
-  if (!conducting.every(isMonatomic)) errors.push(method('eucken'));
+  const methods = new Set(conducting.map(conductionMethod));
+  if (methods.has('monatomic')) errors.push(method('monatomic_conductivity'));
+  if (methods.has('eucken')) errors.push(method('eucken'));
   if (1 < species.length) {
     errors.push(
       method('mixture_viscosity'),
@@ -59,16 +63,19 @@ function diffusionErrors(species: readonly Species[], T: number): ModelError[] {
   return errors;
 }
 
-function method(key: keyof typeof methods): ModelError {
-  return { key, relative: methods[key] };
+function method(key: keyof typeof methodErrors): ModelError {
+  return { key, relative: methodErrors[key] };
 }
 
-function viscosityError({ formula, viscosity }: Species, T: number): ModelError[] {
-  if (viscosity === undefined) return [];
-  const stated = viscosity.uncertainty ?? unstated;
-  return [
-    { key: `viscosity:${formula}`, relative: within(viscosity.value, T) ? stated : Math.max(stated, beyondRange) },
-  ];
+function correlationError(
+  property: string,
+  formula: string,
+  data: Sourced<Correlation> | undefined,
+  T: number,
+): ModelError[] {
+  if (data === undefined) return [];
+  const stated = data.uncertainty ?? unstated;
+  return [{ key: `${property}:${formula}`, relative: within(data.value, T) ? stated : Math.max(stated, beyondRange) }];
 }
 
 function heatError({ formula, heatCapacity }: Species, T: number): ModelError[] {

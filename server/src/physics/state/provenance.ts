@@ -86,6 +86,8 @@ function dataSource(species: Species, kind: DataKind): SourceId | undefined {
   switch (kind) {
     case 'viscosity':
       return species.viscosity?.source;
+    case 'conductivity':
+      return species.conductivity?.source;
     case 'heat_capacity':
       return species.heatCapacity?.source;
     case 'pair_potential':
@@ -109,6 +111,7 @@ function commonRange(species: readonly Species[], kinds: readonly DataKind[]): T
 
 function dataRange(species: Species, kind: DataKind): { readonly low: number; readonly high: number } | undefined {
   if (kind === 'viscosity') return species.viscosity?.value;
+  if (kind === 'conductivity') return species.conductivity?.value;
   if (kind === 'heat_capacity' && species.heatCapacity !== undefined)
     return heatCapacityRange(species.heatCapacity.value);
   return undefined;

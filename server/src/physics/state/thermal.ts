@@ -1,7 +1,7 @@
 import { R } from '../constants';
 import type { Outcome } from '../outcome';
 import type { Species } from '../species/species';
-import { isMonatomic } from '../transport/conductivity';
+import { conductionMethod } from '../transport/conductivity';
 import type { GasState } from './gasState';
 import { map, map2 } from './gasState';
 import type { Method, StateProperty } from './property';
@@ -28,7 +28,9 @@ const masonSaxena: Method = {
   method: 'Wassiljewa with Mason–Saxena coefficients',
   sources: ['Mason & Saxena 1958', 'Poling 2001', 'Chapman & Cowling 1970'],
 };
-const conduction = (species: Species): Method => (isMonatomic(species) ? monatomic : eucken);
+const correlation: Method = { method: 'dilute-gas correlation', sources: [] };
+const conductionMethods = { correlation, monatomic, eucken } as const;
+const conduction = (species: Species): Method => conductionMethods[conductionMethod(species)];
 
 /** A ratio with the conductivity in it has the conductivity's sources. */
 function throughConduction(method: string): Pick<StateProperty, 'method' | 'sources' | 'methodFor' | 'mixed'> {
@@ -139,7 +141,7 @@ export const thermalProperties: readonly StateProperty[] = [
     ...eucken,
     methodFor: conduction,
     mixed: masonSaxena,
-    restsOn: ['viscosity', 'heat_capacity'],
+    restsOn: ['viscosity', 'conductivity', 'heat_capacity'],
     compute: ({ conductivity }) => conductivity,
     computeFor: ({ conductivity }) => conductivity,
   },
@@ -149,7 +151,7 @@ export const thermalProperties: readonly StateProperty[] = [
     quantityKind: 'diffusivity',
     perSpecies: false,
     ...throughConduction('λ/(ρ c_p)'),
-    restsOn: ['viscosity', 'heat_capacity'],
+    restsOn: ['viscosity', 'conductivity', 'heat_capacity'],
     compute: thermalDiffusivity,
   },
   {
@@ -158,7 +160,7 @@ export const thermalProperties: readonly StateProperty[] = [
     quantityKind: 'number',
     perSpecies: false,
     ...throughConduction('η c_p/λ'),
-    restsOn: ['viscosity', 'heat_capacity'],
+    restsOn: ['viscosity', 'conductivity', 'heat_capacity'],
     compute: ({ viscosity, conductivity, cp, molarMass }) =>
       map2(
         map2(viscosity, cp, (eta, heat) => (eta * heat) / molarMass),
@@ -171,6 +173,6 @@ export const thermalProperties: readonly StateProperty[] = [
     symbol: 'Le',
     quantityKind: 'number',
     ...throughConduction('α/D'),
-    restsOn: ['viscosity', 'heat_capacity', 'pair_potential'],
+    restsOn: ['viscosity', 'conductivity', 'heat_capacity', 'pair_potential'],
   },
 ];

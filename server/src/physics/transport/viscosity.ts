@@ -3,8 +3,8 @@ import type { Note, Outcome } from '../outcome';
 import { failure, success } from '../outcome';
 import type { LennardJones, Species } from '../species/species';
 import { omega22 } from './collisionIntegrals';
-import type { ViscosityCorrelation } from './viscosityCorrelation';
-import { correlatedViscosity } from './viscosityCorrelation';
+import type { Correlation } from './correlation';
+import { correlated } from './correlation';
 
 /**
  * Dilute-gas viscosity of one species, Pa s, at a temperature in K.
@@ -15,7 +15,7 @@ export function viscosity(species: Species, temperature: number): Outcome<number
   const data = species.viscosity;
   if (data === undefined) return failure({ kind: 'no-data', species: species.formula, property: 'viscosity' });
   const { low, high } = data.value;
-  if (low <= temperature && temperature <= high) return success(correlatedViscosity(data.value, temperature));
+  if (low <= temperature && temperature <= high) return success(correlated(data.value, temperature));
   const range = { quantity: 'temperature', value: temperature, low, high } as const;
   const potential = species.lennardJones?.value;
   if (potential === undefined) return failure({ kind: 'outside-range', ...range, source: data.source });
@@ -42,13 +42,8 @@ export function diameterOfViscosity(viscosity: number, molarMass: number, temper
   return Math.sqrt((0.3125 * Math.sqrt((molarMass / N_A) * k * temperature)) / (Math.sqrt(Math.PI) * viscosity));
 }
 
-function continued(
-  data: ViscosityCorrelation,
-  potential: LennardJones,
-  molarMass: number,
-  temperature: number,
-): number {
+function continued(data: Correlation, potential: LennardJones, molarMass: number, temperature: number): number {
   const end = temperature < data.low ? data.low : data.high;
   const growth = potentialViscosity(potential, molarMass, temperature) / potentialViscosity(potential, molarMass, end);
-  return correlatedViscosity(data, end) * growth;
+  return correlated(data, end) * growth;
 }

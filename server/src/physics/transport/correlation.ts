@@ -1,39 +1,55 @@
-/** How the dilute-gas viscosity of a species was correlated. Every form gives Pa s from K between `low` and `high`. */
-export type ViscosityCorrelation = { readonly low: number; readonly high: number } & Form;
+/** How a property of the dilute gas was correlated with temperature. Every form gives SI from K between `low` and `high`. */
+export type Correlation = { readonly low: number; readonly high: number } & Form;
 
 type Form =
-  /** η = C √T / exp Σ aᵢ (ln T/θ)ⁱ: a collision integral by a logarithmic series. */
+  /** y = C √T / exp Σ aᵢ (ln T/θ)ⁱ: a collision integral by a logarithmic series. */
   | {
       readonly kind: 'collision-integral';
       readonly prefactor: number;
       readonly theta: number;
       readonly coefficients: readonly number[];
     }
-  /** η = C √(T/θ) Σ cᵢ (T/θ)^((i−1)/3 − 1), i from 1: the reciprocal collision integral in cube roots. */
+  /** y = C √(T/θ) Σ cᵢ (T/θ)^((i−1)/3 − 1), i from 1: the reciprocal collision integral in cube roots. */
   | {
       readonly kind: 'cube-roots';
       readonly prefactor: number;
       readonly theta: number;
       readonly coefficients: readonly number[];
     }
-  /** η = C √(T/θ) / Σ Hᵢ (θ/T)ⁱ. */
+  /** y = C √(T/θ) / Σ Hᵢ (θ/T)ⁱ. */
   | {
       readonly kind: 'inverse-powers';
       readonly prefactor: number;
       readonly theta: number;
       readonly coefficients: readonly number[];
     }
-  /** η = Σ dᵢ (T/θ)^(i/4). */
+  /** y = Σ dᵢ (T/θ)^(i/4). */
   | { readonly kind: 'fourth-roots'; readonly theta: number; readonly coefficients: readonly number[] }
-  /** η = C exp(A ln T + B/T + D/T² + E), piece by piece up to `high`. */
+  /** y = C exp(A ln T + B/T + D/T² + E), piece by piece up to `high`. */
   | { readonly kind: 'exponential'; readonly prefactor: number; readonly pieces: readonly ExponentialPiece[] }
-  /** η = C exp(c₀/x + c₁ + c₂x + c₃x² + …) with x = ln T. */
+  /** y = C exp(c₀/x + c₁ + c₂x + c₃x² + …) with x = ln T. */
   | { readonly kind: 'logarithmic'; readonly prefactor: number; readonly coefficients: readonly number[] }
+  /** y = C Σ aᵢ (T/θ)ⁱ / Σ bᵢ (T/θ)ⁱ. */
+  | {
+      readonly kind: 'ratio';
+      readonly prefactor: number;
+      readonly theta: number;
+      readonly numerator: readonly number[];
+      readonly denominator: readonly number[];
+    }
+  /** y = N₁ η + Σ nᵢ (T/θ)^tᵢ: a conductivity that leans on the viscosity, itself correlated. */
+  | {
+      readonly kind: 'with-viscosity';
+      readonly viscosity: Correlation;
+      readonly perViscosity: number;
+      readonly theta: number;
+      readonly terms: readonly { readonly n: number; readonly t: number }[];
+    }
   /** One correlation below `from`, another above `to`, and between them the mean weighted evenly in ln T. */
   | {
       readonly kind: 'joined';
-      readonly cold: ViscosityCorrelation;
-      readonly warm: ViscosityCorrelation;
+      readonly cold: Correlation;
+      readonly warm: Correlation;
       readonly from: number;
       readonly to: number;
     };
@@ -51,8 +67,8 @@ export function chapmanEnskogPrefactor(constant: number, molarMass: number, diam
   return (1e-6 * constant * Math.sqrt(molarMass)) / (diameter * diameter);
 }
 
-/** The correlation as published, Pa s, for a temperature in K within its range. */
-export function correlatedViscosity(data: ViscosityCorrelation, T: number): number {
+/** The correlation as published, in SI, for a temperature in K within its range. */
+export function correlated(data: Correlation, T: number): number {
   switch (data.kind) {
     case 'collision-integral':
       return (data.prefactor * Math.sqrt(T)) / Math.exp(polynomial(data.coefficients, Math.log(T / data.theta)));
@@ -70,6 +86,14 @@ export function correlatedViscosity(data: ViscosityCorrelation, T: number): numb
       const x = Math.log(T);
       return data.prefactor * Math.exp(polynomial(data.coefficients, x) / x);
     }
+    case 'ratio': {
+      const x = T / data.theta;
+      return (data.prefactor * polynomial(data.numerator, x)) / polynomial(data.denominator, x);
+    }
+    case 'with-viscosity': {
+      const powers = data.terms.reduce((sum, { n, t }) => sum + n * Math.pow(T / data.theta, t), 0);
+      return data.perViscosity * correlated(data.viscosity, T) + powers;
+    }
     case 'joined':
       return joined(data.cold, data.warm, data.from, data.to, T);
     default:
@@ -77,11 +101,11 @@ export function correlatedViscosity(data: ViscosityCorrelation, T: number): numb
   }
 }
 
-function joined(cold: ViscosityCorrelation, warm: ViscosityCorrelation, from: number, to: number, T: number): number {
-  if (T <= from) return correlatedViscosity(cold, T);
-  if (to <= T) return correlatedViscosity(warm, T);
+function joined(cold: Correlation, warm: Correlation, from: number, to: number, T: number): number {
+  if (T <= from) return correlated(cold, T);
+  if (to <= T) return correlated(warm, T);
   const weight = Math.log(T / from) / Math.log(to / from);
-  return (1 - weight) * correlatedViscosity(cold, T) + weight * correlatedViscosity(warm, T);
+  return (1 - weight) * correlated(cold, T) + weight * correlated(warm, T);
 }
 
 function exponent(pieces: readonly ExponentialPiece[], T: number): number {
