@@ -48,6 +48,7 @@ export interface NumberLiteral extends At {
   readonly kind: 'number';
   readonly value: number;
   /** The digits as written, without the unit. */
+  readonly text: string;
   readonly digits: Span;
   readonly unit?: UnitText;
   /** The decimal sign was a comma. */

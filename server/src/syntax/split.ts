@@ -23,7 +23,7 @@ export function split(text: string): readonly Stretch[] {
     depth = 0;
   };
 
-  for (let start = 0; start < text.length; ) {
+  for (let start = 0; start < text.length;) {
     const end = lineEnd(text, start);
     let at = skipSpace(text, start, end);
     if (at === end) {

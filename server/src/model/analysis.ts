@@ -1,0 +1,119 @@
+import type { File } from '../syntax/nodes';
+import type { Declared } from './declare';
+import type { Document } from './document';
+import type { Evaluated, Outcome } from './evaluated';
+import type { Evaluation, Place } from './evaluation';
+import { circularDefinition } from './problems/circularDefinition';
+import { duplicateName } from './problems/duplicateName';
+import type { Problem, Related } from './problems/problem';
+import { unusedDeclaration } from './problems/unusedDeclaration';
+import type { DisplayUnits } from './quantity';
+import { references } from './references';
+import type { DeclarationScope } from './scope';
+
+/** Everything there is to say of one file at one moment. Features read it and nothing else. */
+export interface Analysis {
+  readonly uri: string;
+  readonly text: string;
+  readonly file: File;
+  readonly declared: readonly Declared[];
+  readonly display: DisplayUnits;
+  /** The addresses of the files it uses, as far as they can be read. */
+  readonly uses: Document['uses'];
+  outcome(declared: Declared): Outcome;
+  problems(): readonly LocatedProblem[];
+  /** Where a name is declared: here or in a file that is used. */
+  find(name: string): Place | undefined;
+  /** To evaluate an expression of a declaration by itself, for showing. */
+  scope(declared: Declared, report?: (problem: Problem) => void): DeclarationScope;
+  /** The declarations that had to run for this analysis. */
+  readonly ran: readonly string[];
+}
+
+/** A problem of this file; its spans count from `offset`. */
+export interface LocatedProblem {
+  readonly problem: Problem;
+  readonly offset: number;
+  readonly declared: Declared;
+}
+
+export function createAnalysis(document: Document, evaluation: Evaluation): Analysis {
+  const { declarations, file, uri, text, display, uses } = document;
+  const evaluated = (declared: Declared): Evaluated => evaluation.evaluated({ document, declared });
+  let problems: readonly LocatedProblem[] | undefined;
+  return {
+    uri,
+    text,
+    file,
+    declared: declarations.all,
+    display,
+    uses,
+    outcome: (declared) => evaluated(declared).outcome,
+    problems: () => (problems ??= allProblems(document, evaluation, evaluated)),
+    find: (name) => evaluation.find(document, name),
+    scope: (declared, report = () => undefined) => evaluation.scope({ document, declared }, report),
+    ran: evaluation.ran,
+  };
+}
+
+function allProblems(
+  document: Document,
+  evaluation: Evaluation,
+  evaluated: (declared: Declared) => Evaluated,
+): readonly LocatedProblem[] {
+  const unused = unusedDeclarations(document);
+  return document.declarations.all.flatMap((declared) => {
+    const own = [
+      ...evaluated(declared).problems,
+      ...duplicate(document, declared),
+      ...circular(evaluation.circleOf({ document, declared }), declared),
+    ];
+    if (declared.name && unused.has(declared))
+      own.push(unusedDeclaration.at(declared.name.span, { name: declared.name.text }));
+    return own.map((problem) => ({ problem, offset: declared.item.offset, declared }));
+  });
+}
+
+function duplicate(document: Document, { name }: Declared): readonly Problem[] {
+  const same = name ? (document.declarations.byName.get(name.text) ?? []) : [];
+  if (!name || same.length < 2) return [];
+  const related = same
+    .filter((other) => other.name !== name)
+    .map((other) => relatedTo({ document, declared: other }, 'declared here as well'));
+  return [duplicateName.at(name.span, { name: name.text }, { related })];
+}
+
+function circular(circle: readonly Place[] | undefined, declared: Declared): readonly Problem[] {
+  if (!circle) return [];
+  const others = circle.filter((place) => place.declared !== declared);
+  const round = [declared, ...others.map((place) => place.declared)].map(({ id }) => id);
+  const span = (declared.name ?? declared.item.declaration).span;
+  return [
+    circularDefinition.at(span, { round }, { related: others.map((place) => relatedTo(place, 'part of the circle')) }),
+  ];
+}
+
+function relatedTo({ document, declared }: Place, message: string): Related {
+  const { start, end } = (declared.name ?? declared.item.declaration).span;
+  return { message, uri: document.uri, offset: declared.item.offset + start, length: end - start };
+}
+
+/** Definitions that nothing reads. A file of definitions alone is there to be used by others. */
+function unusedDeclarations({ declarations, file }: Document): ReadonlySet<Declared> {
+  const definition = ({ item }: Declared) =>
+    ['let', 'gas'].includes(item.declaration.kind) || item.declaration.word.text === 'species';
+  const results = file.items.some(
+    ({ declaration }) =>
+      ['require', 'site'].includes(declaration.kind) ||
+      (declaration.kind === 'thing' && declaration.word.text !== 'species'),
+  );
+  if (!results) return new Set();
+  const used = new Set(
+    declarations.all.flatMap(({ item, name }) =>
+      references(item.declaration).flatMap(({ text }) => (text === name?.text ? [] : [text])),
+    ),
+  );
+  return new Set(
+    declarations.all.filter((declared) => definition(declared) && declared.name && !used.has(declared.name.text)),
+  );
+}

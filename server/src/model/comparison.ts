@@ -1,0 +1,176 @@
+import { dimensionless } from '../quantities/dimension';
+import { describeDimension } from '../quantities/quantityKinds';
+import type { Between, Comparison, Expression, Is, Logic, Unary, Within } from '../syntax/nodes';
+import { map, multiply, negate, subtract } from './arithmetic';
+import { describeValue, evaluate, evaluateQuantity } from './expression';
+import { mismatch } from './mismatch';
+import { wrongType } from './problems/wrongType';
+import type { Scope } from './scope';
+import { exact, halfWidth } from './tolerance';
+import type { Quantity, Side, Verdict } from './values';
+
+/**
+ * Conditions. Each becomes *room*: the distance to the limit, positive when the condition holds. Since the room carries the
+ * leans of both sides, an input that moves both alike does not make the condition uncertain.
+ */
+export function evaluateComparison(node: Comparison, scope: Scope): Verdict | undefined {
+  // a < b < c compares b twice.
+  if (node.left.kind === 'comparison') {
+    const first = evaluateComparison(node.left, scope);
+    const second = evaluateComparison({ ...node, left: node.left.right }, scope);
+    return first && second && both(first, second);
+  }
+  const sides = evaluateAlike([node.left, node.right], scope);
+  const [left, right] = sides ?? [];
+  if (!left || !right || !sides) return undefined;
+  const shown = [side('', left), side('', right)];
+  switch (node.operator) {
+    case '<':
+    case '<=':
+      return verdict(node, subtract(right, left), right, shown, { strict: node.operator === '<' });
+    case '>':
+    case '>=':
+      return verdict(node, subtract(left, right), right, shown, { strict: node.operator === '>' });
+    case '==':
+      return plain(node, left.si === right.si, shown);
+    case '!=':
+      return plain(node, left.si !== right.si, shown);
+  }
+}
+
+export function evaluateWithin(node: Within, scope: Scope): Verdict | undefined {
+  const values = evaluateAlike([node.target, node.value], scope);
+  const width = evaluateQuantity(node.halfWidth, scope, 'within');
+  const [target, value] = values ?? [];
+  if (!target || !value || !width) return undefined;
+  const relative =
+    width.dimension === dimensionless && target.dimension !== dimensionless ? true : width.unit?.text === '%';
+  const allowed = relative ? multiply(width, map(target, Math.abs(target.si), Math.sign(target.si))) : width;
+  if (allowed.dimension !== value.dimension) {
+    mismatch(
+      node.halfWidth,
+      width,
+      { subject: 'the half-width', dimension: value.dimension, wants: describeDimension(value.dimension) },
+      scope,
+    );
+    return undefined;
+  }
+  const distance = subtract(value, target);
+  const size = distance.si < 0 ? negate(distance) : distance;
+  return verdict(node, subtract(allowed, size), allowed, [side('', value), side('of ', target)], { strict: false });
+}
+
+export function evaluateBetween(node: Between, scope: Scope): Verdict | undefined {
+  const [value, low, high] = evaluateAlike([node.value, node.low, node.high], scope) ?? [];
+  if (!value || !low || !high) return undefined;
+  const shown = [side('', value), side('from ', low), side('to ', high)];
+  const width = subtract(high, low);
+  const above = verdict(node, subtract(value, low), width, shown, { strict: false });
+  return both(above, verdict(node, subtract(high, value), width, shown, { strict: false }));
+}
+
+/** `in_foreline.regime is molecular` */
+export function evaluateIs(node: Is, scope: Scope): Verdict | undefined {
+  const left = evaluate(node.left, scope);
+  if (!left || node.right.kind === 'hole') return undefined;
+  if (left.kind !== 'word') {
+    scope.report(
+      wrongType.at(node.left.span, { subject: '“is”', wants: 'a word such as a regime', found: describeValue(left) }),
+    );
+    return undefined;
+  }
+  const holds = (left.text === node.right.text) !== node.negated;
+  return plain(node, holds, [{ text: left.text }]);
+}
+
+export function evaluateLogic(node: Logic, scope: Scope): Verdict | undefined {
+  const left = evaluateCondition(node.left, scope);
+  const right = evaluateCondition(node.right, scope);
+  if (!left || !right) return undefined;
+  return node.operator === 'and' ? both(left, right) : not(both(not(left), not(right)));
+}
+
+export function evaluateNot(node: Unary, scope: Scope): Verdict | undefined {
+  const operand = evaluateCondition(node.operand, scope);
+  return operand && not(operand);
+}
+
+/** The value of an expression that must be a condition. */
+export function evaluateCondition(node: Expression, scope: Scope): Verdict | undefined {
+  const value = evaluate(node, scope);
+  if (value === undefined || value.kind === 'verdict') return value;
+  scope.report(
+    wrongType.at(node.span, {
+      subject: 'this place',
+      wants: 'a condition such as a >= b',
+      found: describeValue(value),
+    }),
+  );
+  return undefined;
+}
+
+function evaluateAlike(nodes: readonly Expression[], scope: Scope): readonly Quantity[] | undefined {
+  const values = nodes.map((node) => evaluateQuantity(node, scope, 'a comparison'));
+  const [first] = values;
+  const known: Quantity[] = [];
+  for (const [index, value] of values.entries()) {
+    const node = nodes[index];
+    if (!first || !value || !node) continue;
+    if (value.dimension === first.dimension) known.push(value);
+    else
+      mismatch(
+        node,
+        value,
+        { subject: 'the other side', dimension: first.dimension, wants: describeDimension(first.dimension) },
+        scope,
+      );
+  }
+  return known.length === nodes.length ? known : undefined;
+}
+
+function verdict(
+  node: Expression,
+  room: Quantity,
+  limit: Quantity,
+  sides: readonly Side[],
+  { strict }: { strict: boolean },
+): Verdict {
+  const holds = strict ? room.si > 0 : room.si >= 0;
+  const uncertain = halfWidth(room.leans) > Math.abs(room.si);
+  const status = uncertain ? 'undecided' : holds ? 'holds' : 'fails';
+  const margin = room.si / Math.abs(limit.si);
+  return {
+    kind: 'verdict',
+    status,
+    ...(Number.isFinite(margin) ? { margin } : {}),
+    sides,
+    holds,
+    leans: room.leans,
+    relation: node.span,
+  };
+}
+
+/** A condition in which nothing is measured. */
+function plain(node: Expression, holds: boolean, sides: readonly Side[]): Verdict {
+  return { kind: 'verdict', status: holds ? 'holds' : 'fails', holds, sides, leans: exact, relation: node.span };
+}
+
+/** Both conditions: the worse one tells. */
+function both(a: Verdict, b: Verdict): Verdict {
+  const worse =
+    RANK[a.status] < RANK[b.status] || (a.status === b.status && (a.margin ?? Infinity) <= (b.margin ?? Infinity))
+      ? a
+      : b;
+  return { ...worse, holds: a.holds && b.holds };
+}
+
+const RANK = { fails: 0, undecided: 1, holds: 2 } as const;
+
+function not(a: Verdict): Verdict {
+  const status = a.status === 'undecided' ? 'undecided' : a.status === 'holds' ? 'fails' : 'holds';
+  return { ...a, status, holds: !a.holds, ...(a.margin === undefined ? {} : { margin: -a.margin }) };
+}
+
+function side(text: string, value: Quantity): Side {
+  return { text, value };
+}

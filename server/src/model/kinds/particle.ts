@@ -1,0 +1,21 @@
+import type { Kind } from './kind';
+import { length, ofQuantity } from './kind';
+
+export const particle: Kind = {
+  word: 'particle',
+  title: 'a particle',
+  meaning: 'a small sphere in the gas',
+  role: 'geometry',
+  heads: [],
+  keys: [
+    length('diameter', 'the diameter', '1 µm', { symbol: 'd' }),
+    ofQuantity('density', 'density', 'the density of its material', '2500 kg/m³', { symbol: 'ρ' }),
+  ],
+  needs: [
+    { count: 1, of: ['diameter'] },
+    { count: 1, of: ['density'] },
+  ],
+  hint: ['diameter'],
+  later: ['diameter', 'density'],
+  snippet: 'particle ${1:name} { diameter = ${2:1 µm}, density = ${3:2500 kg/m³} }',
+};

@@ -1,0 +1,27 @@
+import type { Kind } from './kind';
+import { length, ofQuantity } from './kind';
+
+export const plug: Kind = {
+  word: 'plug',
+  title: 'a plug',
+  meaning: 'a porous plug',
+  role: 'geometry',
+  heads: [],
+  keys: [
+    ofQuantity('area', 'area', 'the area that the gas enters', '1 cm²', { symbol: 'A' }),
+    length('thickness', 'the thickness along the flow', '3 mm'),
+    ofQuantity('permeability', 'permeability', 'the viscous permeability (Darcy)', '1e-13 m²'),
+    length('pore', 'the diameter of the pores', '1 µm'),
+    ofQuantity('porosity', 'fraction', 'the share of the volume that is open', '35 %', { bound: 'fraction' }),
+  ],
+  needs: [
+    { count: 1, of: ['area'] },
+    { count: 1, of: ['thickness'] },
+    { count: 1, of: ['permeability'] },
+    { count: 1, of: ['pore'] },
+  ],
+  hint: ['volume'],
+  later: ['volume', 'characteristic_length', 'transmission_probability'],
+  snippet:
+    'plug ${1:name} { area = ${2:1 cm²}, thickness = ${3:3 mm}, permeability = ${4:1e-13 m²}, pore = ${5:1 µm} }',
+};

@@ -1,0 +1,110 @@
+import type { Span } from '../../syntax/nodes';
+import { divide, multiply } from '../arithmetic';
+import { figure, figures } from '../figures';
+import { plainNumber, quantity } from '../quantity';
+import type { Scope } from '../scope';
+import type { Figure, Members, Provenance, Quantity, Record } from '../values';
+import { wrongType } from '../problems/wrongType';
+import { regimeOf } from '../regime';
+
+/** The results that a site has or will have, for completion and for what is not computed yet. */
+export const siteResults = {
+  hint: ['knudsen', 'regime'],
+  later: [
+    'conductance',
+    'poiseuille_coefficient',
+    'thermal_creep_coefficient',
+    'slip_factor',
+    'settling_speed',
+    'stopping_distance',
+  ],
+} as const;
+
+/** A gas at rest in a place: its Knudsen number on the place's characteristic length, and what follows from it. */
+export function computeSite(state: Record, geometry: Record, span: Span, scope: Scope): Record | undefined {
+  const path = state.members.get('mean_free_path');
+  const size = quantityOf(geometry.members, 'characteristic_length');
+  if (!size) {
+    scope.report(
+      wrongType.at(span, { subject: 'a site', wants: 'a place with a characteristic length', found: geometry.word }),
+    );
+    return undefined;
+  }
+  if (path?.kind !== 'figure' || path.value.kind !== 'quantity') {
+    const why = path?.kind === 'absent' ? path.why : 'the state has no mean free path';
+    const members: Members = new Map([
+      ...contents(state, geometry),
+      ['knudsen', { kind: 'absent', why }],
+      ['regime', { kind: 'absent', why }],
+    ]);
+    return record(state, members);
+  }
+  const knudsen = divide(path.value, size);
+  const limits = scope.regimeLimits();
+  const provenance: Provenance = {
+    ...path.provenance,
+    method: `Kn = λ/ℓ on the ${sizeName(geometry)}; λ: ${path.provenance.method}`,
+  };
+  const kn = { ...quantity(knudsen.si, knudsen.dimension, knudsen.leans), quantityKind: 'number' };
+  const members: Members = new Map([
+    ['knudsen', figure(kn, provenance)],
+    ['rarefaction', rarefaction(kn, geometry, provenance)],
+    [
+      'regime',
+      figure(
+        { kind: 'word', text: regimeOf(knudsen.si, limits) },
+        {
+          ...provenance,
+          method: `by the Knudsen number: viscous < ${limits.slip} ≤ slip < ${limits.transitional} ≤ transitional < ${limits.molecular} ≤ molecular`,
+        },
+      ),
+    ],
+    ...contents(state, geometry),
+  ]);
+  return record(state, members);
+}
+
+/** δ = (√π/2) a/λ, with the radius of a round passage or the gap between plates as a. */
+function rarefaction(knudsen: Quantity, geometry: Record, provenance: Provenance): Figure {
+  const half = geometry.word === 'tube' || geometry.word === 'orifice' ? 2 : 1;
+  const delta = divide(plainNumber(Math.sqrt(Math.PI) / 2 / half), knudsen);
+  const from = half === 2 ? 'the radius' : 'the characteristic length';
+  return figure(
+    { ...quantity(delta.si, delta.dimension, delta.leans), quantityKind: 'number' },
+    { ...provenance, method: `δ = (√π/2)·a/λ, on ${from}` },
+  );
+}
+
+/** N = nV and Ż = (n c̄/4) S */
+function contents(state: Record, geometry: Record): Members {
+  const number = quantityOf(state.members, 'number_density');
+  const impingement = quantityOf(state.members, 'impingement_rate');
+  const volume = quantityOf(geometry.members, 'volume');
+  const wall = quantityOf(geometry.members, 'wall_area');
+  return new Map([
+    ...(number && volume ? figures('number density times volume', { molecules: multiply(number, volume) }) : []),
+    ...(impingement && wall
+      ? figures('impingement rate times wall area', { wall_collision_rate: multiply(impingement, wall) })
+      : []),
+  ]);
+}
+
+function record(state: Record, members: Members): Record {
+  return {
+    kind: 'record',
+    word: 'site',
+    members,
+    species: new Map(),
+    inputs: new Map(),
+    ...(state.gas ? { gas: state.gas } : {}),
+  };
+}
+
+function sizeName(geometry: Record): string {
+  return geometry.word === 'tube' || geometry.word === 'orifice' ? 'bore' : 'characteristic length';
+}
+
+function quantityOf(members: Members, name: string): Quantity | undefined {
+  const found = members.get(name);
+  return found?.kind === 'figure' && found.value.kind === 'quantity' ? found.value : undefined;
+}

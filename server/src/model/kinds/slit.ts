@@ -1,0 +1,24 @@
+import type { Kind } from './kind';
+import { accommodation, length } from './kind';
+
+export const slit: Kind = {
+  word: 'slit',
+  title: 'a slit',
+  meaning: 'a long slit between parallel plates; its end walls are neglected',
+  role: 'geometry',
+  heads: [],
+  keys: [
+    length('height', 'the distance of the plates', '0.1 mm', { symbol: 'h' }),
+    length('width', 'the width across the flow', '100 mm', { symbol: 'b' }),
+    length('length', 'the length along the flow', '10 mm', { symbol: 'L' }),
+    accommodation,
+  ],
+  needs: [
+    { count: 1, of: ['height'] },
+    { count: 1, of: ['width'] },
+    { count: 1, of: ['length'] },
+  ],
+  hint: ['area', 'volume'],
+  later: ['area', 'volume', 'hydraulic_diameter', 'characteristic_length', 'transmission_probability'],
+  snippet: 'slit ${1:name} { height = ${2:0.1 mm}, width = ${3:100 mm}, length = ${4:10 mm} }',
+};

@@ -1,0 +1,130 @@
+import { toSI, toSIDifference, fromSI } from '../quantities/conversion';
+import { formatNumber } from '../quantities/format';
+import type { Unit, UnitFault } from '../quantities/parseUnit';
+import { parseUnit, unitOf } from '../quantities/parseUnit';
+import type { Expression, NumberLiteral, UnitText } from '../syntax/nodes';
+import { ambiguousTemperature } from './problems/ambiguousTemperature';
+import { absoluteZero } from './problems/absoluteZero';
+import { decimalComma } from './problems/decimalComma';
+import { gaugePressure } from './problems/gaugePressure';
+import { replacement } from './problems/problem';
+import { unknownUnit } from './problems/unknownUnit';
+import { plainNumber, quantity, show } from './quantity';
+import type { Scope } from './scope';
+import type { Quantity } from './values';
+
+/** How a literal is meant: as a value, or as a difference (after ± or added to something). */
+export type LiteralRole = 'value' | 'difference';
+
+/**
+ * Reads a number with its unit. Offset temperatures and gauge pressures are converted here, sign included, because
+ * they are points on a scale: in the algebra there are only kelvin and absolute pressures.
+ */
+export function readLiteral(
+  node: NumberLiteral,
+  scope: Scope,
+  role: LiteralRole = 'value',
+  sign: 1 | -1 = 1,
+): Quantity | undefined {
+  if (node.comma) {
+    scope.report(decimalComma.at(node.digits, { digits: node.text, inList: false }));
+    return undefined;
+  }
+  const value = sign * node.value;
+  if (!node.unit) return plainNumber(value);
+  const unit = readUnit(node.unit, scope);
+  if (!unit) return undefined;
+  if (role === 'difference')
+    return { ...quantity(toSIDifference(value, unit, reference(unit, scope)), unit.dimension), ...keptUnit(unit) };
+  switch (unit.kind) {
+    case 'gauge':
+      return readGauge(node, value, unit, scope);
+    case 'offset':
+      return readOffset(node, value, unit, scope);
+    case 'plain':
+    case 'standard-flow':
+      return { ...quantity(toSI(value, unit, reference(unit, scope)), unit.dimension), unit };
+  }
+}
+
+/** Reads a unit; what is wrong with it is reported at the very part. */
+export function readUnit(node: UnitText, scope: Pick<Scope, 'report'>): Unit | undefined {
+  const result = parseUnit(node.text);
+  if (result.ok) return result.unit;
+  reportUnitFault(node, result.fault, scope);
+  return undefined;
+}
+
+/** Whether an expression is a literal such as `25 °C`: a point on a scale, not yet a quantity of the algebra. */
+export function offsetLiteral(node: Expression): NumberLiteral | undefined {
+  switch (node.kind) {
+    case 'number': {
+      const unit = node.unit && parseUnit(node.unit.text);
+      return unit?.ok && unit.unit.kind === 'offset' ? node : undefined;
+    }
+    case 'unary':
+      return node.operator === 'not' ? undefined : offsetLiteral(node.operand);
+    case 'group':
+      return offsetLiteral(node.inner);
+    case 'tolerance':
+      return offsetLiteral(node.value);
+    default:
+      return undefined;
+  }
+}
+
+function readGauge(node: NumberLiteral, value: number, unit: Unit, scope: Scope): Quantity {
+  const ambient = scope.condition('ambient_pressure');
+  const si = toSI(value, unit) + ambient.si;
+  const absoluteUnit = unitOf(unit.text === 'barg' ? 'bar' : 'psi');
+  const absolute = `${formatNumber(fromSI(si, absoluteUnit), 5)} ${absoluteUnit.text}`;
+  scope.report(gaugePressure.at(node.span, { ambient: show(ambient, { unit: unitOf('kPa') }), absolute }));
+  return { ...quantity(si, unit.dimension, ambient.leans), unit: absoluteUnit };
+}
+
+function readOffset(node: NumberLiteral, value: number, unit: Unit, scope: Scope): Quantity | undefined {
+  const si = toSI(value, unit);
+  if (!(si > 0)) {
+    scope.report(
+      absoluteZero.at(node.span, { subject: 'the temperature', value: `${formatNumber(value, 6)} ${unit.text}` }),
+    );
+    return undefined;
+  }
+  return { ...quantity(si, unit.dimension), unit };
+}
+
+/** A difference is shown in its unit only where that has no zero of its own. */
+function keptUnit(unit: Unit): { unit?: Unit } {
+  return unit.kind === 'plain' || unit.kind === 'standard-flow' ? { unit } : {};
+}
+
+function reference(unit: Unit, scope: Scope): { temperature: number; pressure: number } | undefined {
+  if (unit.standardPower === 0) return undefined;
+  return { temperature: scope.condition('standard_temperature').si, pressure: scope.condition('standard_pressure').si };
+}
+
+function reportUnitFault(node: UnitText, fault: UnitFault, scope: Pick<Scope, 'report'>): void {
+  const span =
+    'start' in fault ? { start: node.span.start + fault.start, end: node.span.start + fault.end } : node.span;
+  switch (fault.kind) {
+    case 'unknown':
+      scope.report(unknownUnit.at(span, { name: fault.name, nearest: fault.nearest }));
+      return;
+    case 'offset-in-product':
+      scope.report(
+        ambiguousTemperature.at(span, {
+          written: fault.name,
+          why: 'is a point on a scale and cannot be part of a product; write K',
+          readings: [{ ...replacement(span, 'K', 'Use K'), preferred: true }],
+        }),
+      );
+      return;
+    case 'gauge-in-product': {
+      const plain = fault.name.replace(/g$/, '');
+      scope.report(unknownUnit.at(span, { name: fault.name, nearest: [plain] }));
+      return;
+    }
+    case 'malformed':
+      scope.report(unknownUnit.at(node.span, { name: node.text, nearest: [] }));
+  }
+}

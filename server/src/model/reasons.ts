@@ -1,0 +1,53 @@
+import { sources } from '../physics/sources';
+import type { SourceId } from '../physics/sources';
+import type { DataKind, Reason } from '../physics/outcome';
+import { formatNumber } from '../quantities/format';
+
+/** Why the engine has no value, in a reader's words. */
+export function explainReason(reason: Reason): string {
+  switch (reason.kind) {
+    case 'no-data':
+      return `no ${dataTitle(reason.property)} is known for ${reason.species}`;
+    case 'outside-range':
+      return `${spoken(reason.quantity)} is ${formatNumber(reason.value, 4)}, outside ${formatNumber(reason.low, 4)} to ${formatNumber(reason.high, 4)} where anything is known`;
+    case 'not-positive':
+      return `${spoken(reason.quantity)} is ${formatNumber(reason.value, 4)}; it must be above zero`;
+    case 'not-finite':
+      return `${spoken(reason.quantity)} is too large or too small to be represented`;
+    case 'insufficient':
+      return `${reason.given.map(spoken).join(' and ')} do not fix the state; give pressure or temperature as well`;
+    case 'surplus':
+      return `${reason.given.map(spoken).join(', ')} are more than fix the state`;
+    case 'per-species':
+      return `a mixture has no ${spoken(reason.property)} of its own; ask for that of a species, as in NAME.N2.${reason.property}`;
+    case 'empty-composition':
+      return 'the gas has no parts';
+    case 'fraction-sum':
+      return `the fractions add up to ${formatNumber(100 * reason.sum, 6)} %`;
+  }
+}
+
+export function dataTitle(data: DataKind): string {
+  switch (data) {
+    case 'viscosity':
+      return 'viscosity';
+    case 'conductivity':
+      return 'thermal conductivity';
+    case 'heat_capacity':
+      return 'heat capacity';
+    case 'pair_potential':
+      return 'intermolecular potential';
+  }
+}
+
+/** A published work, as a reference reads. */
+export function citation(id: SourceId): string {
+  const source: { authors: string; title: string; year: number; published: string; doi?: string } = sources[id];
+  const { authors, title, year, published, doi } = source;
+  return `${authors} (${year}): ${title}. ${published}${doi ? `, doi:${doi}` : ''}`;
+}
+
+/** `numberDensity`, `mean_free_path` → `number density`, `mean free path` */
+export function spoken(name: string): string {
+  return name.replace(/_/g, ' ').replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
+}

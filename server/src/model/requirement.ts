@@ -1,0 +1,81 @@
+import { walk } from '../syntax/children';
+import type { Expression, RequireDeclaration } from '../syntax/nodes';
+import { evaluateCondition } from './comparison';
+import { requirementFails } from './problems/requirementFails';
+import { requirementUndecided } from './problems/requirementUndecided';
+import { showWithTolerance } from './quantity';
+import type { DisplayUnits } from './quantity';
+import type { DeclarationScope } from './scope';
+import type { Verdict } from './values';
+
+/** Whether a requirement holds; when it does not, a problem says what was found and what was wanted. */
+export function evaluateRequirement(
+  node: RequireDeclaration,
+  text: string,
+  scope: DeclarationScope,
+): Verdict | undefined {
+  const verdict = evaluateCondition(node.condition, scope);
+  if (!verdict || verdict.status === 'holds') return verdict;
+  const found = describeVerdict(verdict, node.condition, text, scope.display());
+  if (verdict.status === 'undecided') {
+    const severity = node.strength === 'require' ? 'warning' : 'information';
+    scope.report(requirementUndecided.at(node.condition.span, { found, holds: verdict.holds }, { severity }));
+    return verdict;
+  }
+  const because = node.because?.kind === 'text' ? node.because.text : undefined;
+  const severity = node.strength === 'require' ? 'error' : 'warning';
+  scope.report(
+    requirementFails.at(
+      node.condition.span,
+      { strength: node.strength, found, ...(because ? { because } : {}) },
+      { severity },
+    ),
+  );
+  return verdict;
+}
+
+/** `bleed.conductance is 12.3 L/s; wanted >= 20 L/s`. Of a compound condition the part that decides is told. */
+export function describeVerdict(verdict: Verdict, condition: Expression, text: string, display: DisplayUnits): string {
+  const relation = relationAt(condition, verdict) ?? condition;
+  const [left, ...rest] = verdict.sides;
+  const first = leftOf(relation);
+  const subject = text.slice(first.span.start, first.span.end);
+  const wanted = text.slice(first.span.end, relation.span.end).trim();
+  const value = left?.value ? showWithTolerance(left.value, { display }) : (left?.text ?? '');
+  const limits = rest
+    .flatMap((side) => (side.value ? [showWithTolerance(side.value, { display })] : []))
+    .filter((limit) => !wanted.includes(limit));
+  const named = /[A-Za-z_]\w*\s*\.|(?<![\d.]\s?)\b[a-z_]\w+\b/.test(
+    wanted.replace(/\b(?:is|not|within|between|and|of)\b/g, ''),
+  );
+  const explained = named && limits.length > 0 ? ` (${limits.join(', ')})` : '';
+  const is = subject === value ? '' : `${subject} is `;
+  return `${is}${value}; wanted ${wanted}${explained}`;
+}
+
+function relationAt(condition: Expression, { relation }: Verdict): Expression | undefined {
+  let found: Expression | undefined;
+  walk(condition, (node) => {
+    if (relation && node.span.start === relation.start && node.span.end === relation.end && isRelation(node))
+      found = node;
+  });
+  return found;
+}
+
+function isRelation(node: { kind: string }): node is Expression {
+  return ['comparison', 'is', 'within', 'between'].includes(node.kind);
+}
+
+function leftOf(node: Expression): Expression {
+  switch (node.kind) {
+    case 'comparison':
+      return node.left.kind === 'comparison' ? node.left.right : node.left;
+    case 'is':
+      return node.left;
+    case 'within':
+    case 'between':
+      return node.value;
+    default:
+      return node;
+  }
+}

@@ -1,0 +1,116 @@
+import { statePropertyNamed } from '../physics/state/properties';
+
+/** What a result is called and means, whatever computes it. */
+export interface ResultDefinition {
+  readonly name: string;
+  readonly symbol?: string;
+  /** Absent for words such as a regime. */
+  readonly quantityKind?: string;
+  /** The unit to show it in unless the file says otherwise, where the kind's usual one would mislead. */
+  readonly unit?: string;
+  readonly meaning: string;
+}
+
+/** What the results of the format mean. Symbols and kinds of the state properties are the engine's own. */
+const meanings: Readonly<{ [name: string]: string | Omit<ResultDefinition, 'name'> }> = {
+  pressure: 'the absolute pressure',
+  temperature: 'the absolute temperature',
+  partial_pressure: 'the pressure that the species would have alone',
+  mole_fraction: 'the share of the molecules',
+  mass_fraction: 'the share of the mass',
+  number_density: 'molecules per volume',
+  density: 'mass per volume',
+  molar_mass: { symbol: 'M', quantityKind: 'molar_mass', meaning: 'mass per amount of substance' },
+  mean_speed: 'the mean of the molecular speeds',
+  rms_speed: 'the root of the mean square of the molecular speeds',
+  most_probable_speed: 'the speed at the peak of the Maxwell distribution',
+  sound_speed: 'the speed of sound of low frequency',
+  heat_capacity_cp: 'at constant pressure, per mass',
+  heat_capacity_cv: 'at constant volume, per mass',
+  molar_heat_capacity_cp: 'at constant pressure, per amount',
+  molar_heat_capacity_cv: 'at constant volume, per amount',
+  heat_capacity_ratio: 'the isentropic exponent of the ideal gas',
+  mean_free_path: 'from the viscosity: the path that Knudsen numbers and rarefied-flow theory use',
+  mean_free_path_hard_sphere: 'between collisions of hard spheres of the collision diameter',
+  collision_diameter: 'the diameter of hard spheres that have the viscosity of the gas',
+  collision_frequency: 'how often one molecule collides, as hard spheres',
+  mean_spacing: 'the edge of the cube that one molecule has on average',
+  viscosity: 'the dynamic viscosity of the dilute gas',
+  kinematic_viscosity: 'the viscosity per density',
+  thermal_conductivity: 'of the dilute gas',
+  thermal_diffusivity: 'how fast warmth spreads',
+  diffusivity: 'of the gas in itself; of a species in the mixture',
+  prandtl: 'how fast momentum spreads against warmth',
+  schmidt: 'how fast momentum spreads against molecules',
+  lewis: 'how fast warmth spreads against molecules',
+  impingement_rate: 'molecules that strike a wall (Hertz–Knudsen)',
+  mass_flux: 'the mass that strikes a wall',
+  monolayer_time: 'how long a clean surface takes to be covered if every molecule stays',
+  thermal_wavelength: 'the de Broglie wavelength of thermal motion',
+  mean_kinetic_energy: 'of the translation of one molecule',
+  mach: { symbol: 'Ma', quantityKind: 'number', meaning: 'the speed of the stream against that of sound' },
+  speed: { symbol: 'u', quantityKind: 'speed', meaning: 'the speed of the stream' },
+  bore: { symbol: 'd', quantityKind: 'length', meaning: 'the inner diameter' },
+  length: { symbol: 'L', quantityKind: 'length', meaning: 'the length along the axis' },
+  thickness: { symbol: 't', quantityKind: 'length', meaning: 'the thickness of the wall' },
+  area: { symbol: 'A', quantityKind: 'area', meaning: 'the area of the section' },
+  volume: { symbol: 'V', quantityKind: 'volume', meaning: 'the volume inside' },
+  wall_area: { symbol: 'S', quantityKind: 'area', meaning: 'the area of the walls' },
+  hydraulic_diameter: { symbol: 'd_h', quantityKind: 'length', meaning: 'four times the section over its rim' },
+  characteristic_length: {
+    symbol: 'ℓ',
+    quantityKind: 'length',
+    meaning: 'the length that the Knudsen number is taken on',
+  },
+  aspect_ratio: { symbol: 'L/d', quantityKind: 'number', meaning: 'the length against the bore' },
+  transmission_probability: {
+    symbol: 'W',
+    quantityKind: 'number',
+    meaning: 'the chance of a molecule to get through, free-molecular',
+  },
+  knudsen: { symbol: 'Kn', quantityKind: 'number', meaning: 'the mean free path against the characteristic length' },
+  rarefaction: {
+    symbol: 'δ',
+    quantityKind: 'number',
+    meaning: 'the rarefaction parameter a·p/(η·√(2kT/m)), with the radius or the gap as a',
+  },
+  regime: { meaning: 'viscous, slip, transitional or molecular, by the Knudsen number' },
+  molecules: { symbol: 'N', quantityKind: 'number', meaning: 'the molecules inside' },
+  wall_collision_rate: {
+    symbol: 'Ż',
+    quantityKind: 'frequency',
+    meaning: 'how many molecules strike the walls per time',
+  },
+  throughput: {
+    symbol: 'q',
+    quantityKind: 'throughput',
+    meaning: 'pressure times volume per time, at the temperature of the gas',
+  },
+  molar_flow: { symbol: 'ṅ', quantityKind: 'amount_flow', unit: 'mol/s', meaning: 'amount of gas per time' },
+  mass_flow: { symbol: 'ṁ', quantityKind: 'mass_flow', meaning: 'mass of gas per time' },
+  molecule_flow: { symbol: 'Ṅ', quantityKind: 'molecule_flow', meaning: 'molecules per time' },
+  standard_flow: {
+    symbol: 'q_n',
+    quantityKind: 'amount_flow',
+    unit: 'sccm',
+    meaning: 'amount of gas per time, in standard volume',
+  },
+};
+
+const definitions: ReadonlyMap<string, ResultDefinition> = new Map(
+  Object.entries(meanings).map(([name, entry]) => [name, definitionOf(name, entry)]),
+);
+
+export const results: readonly ResultDefinition[] = [...definitions.values()];
+
+export function resultNamed(name: string): ResultDefinition | undefined {
+  return definitions.get(name);
+}
+
+function definitionOf(name: string, entry: string | Omit<ResultDefinition, 'name'>): ResultDefinition {
+  if (typeof entry !== 'string') return { name, ...entry };
+  const property = statePropertyNamed(name);
+  return property
+    ? { name, symbol: property.symbol, quantityKind: property.quantityKind, meaning: entry }
+    : { name, meaning: entry };
+}
