@@ -21,13 +21,6 @@ export interface Sourced<T> {
 export type SourceId = keyof typeof sources;
 
 export const sources = {
-  'CODATA 2018': {
-    authors: 'Tiesinga, E.; Mohr, P. J.; Newell, D. B.; Taylor, B. N.',
-    title: 'CODATA recommended values of the fundamental physical constants: 2018',
-    year: 2021,
-    published: 'Rev. Mod. Phys. 93, 025010',
-    doi: '10.1103/RevModPhys.93.025010',
-  },
   'CIAAW 2021': {
     authors: 'Prohaska, T. et al.',
     title: 'Standard atomic weights of the elements 2021 (IUPAC Technical Report)',

@@ -50,7 +50,7 @@ export const CH4: Species = {
     },
     source: 'McBride 2002',
     where: 'table 1, methane, 200 to 6000 K',
-    uncertainty: 0.003,
+    uncertainty: 0.01,
   },
   lennardJones: {
     value: { diameter: 3.758e-10, wellDepth: 148.6 },

@@ -50,7 +50,7 @@ export const NH3: Species = {
     },
     source: 'McBride 2002',
     where: 'table 1, ammonia, 200 to 6000 K',
-    uncertainty: 0.003,
+    uncertainty: 0.005,
   },
   lennardJones: {
     value: { diameter: 2.9e-10, wellDepth: 558.3 },
