@@ -9,7 +9,7 @@ import { solveState } from '../../server/src/physics/state/closure';
 import type { Figure, StateFigures, StateRequest } from '../../server/src/physics/state/evaluateState';
 import { evaluateState } from '../../server/src/physics/state/evaluateState';
 
-export const siteDensity = 1e19;
+const siteDensity = 1e19;
 export const atmosphere = 101325;
 
 export function gas(name: string): Species {
@@ -54,4 +54,9 @@ export function everyFigure(state: StateFigures): { readonly name: string; reado
   const named = (prefix: string, map: ReadonlyMap<string, Outcome<Figure>>) =>
     [...map].map(([name, outcome]) => ({ name: prefix + name, outcome }));
   return [...named('', state.mixture), ...[...state.species].flatMap(([formula, map]) => named(`${formula}.`, map))];
+}
+
+/** Equal to within a relative difference. */
+export function near(a: number, b: number, relative: number, what = ''): void {
+  assert.ok(a === b || Math.abs(a / b - 1) <= relative, `${what} ${a}, ${b}`);
 }

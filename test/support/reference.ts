@@ -37,6 +37,14 @@ export function halfUnit(printed: string): number {
   return 0.5 * 10 ** (Number(exponent) - decimals);
 }
 
+/** The tolerance of a value that was measured by others: their last digit, and the error that we state. */
+export function withinStated(printed: string, relative: number): Tolerance {
+  return {
+    tolerance: halfUnit(printed) + relative * Number(printed),
+    because: 'the source is independent of our correlation, whose stated error must cover the difference',
+  };
+}
+
 function check({ printed, got, within }: ReferenceRow): void {
   const value = got();
   const expected = Number(printed);

@@ -77,3 +77,33 @@ export function success<T>(value: T, notes: readonly Note[] = noNotes): Success<
 export function failure(reason: Reason): Failure {
   return { ok: false, reason };
 }
+
+/** Applies a formula to the value if there is one; notes and reasons pass through. */
+export function map<A, B>(outcome: Outcome<A>, formula: (value: A) => B): Outcome<B> {
+  return outcome.ok ? success(formula(outcome.value), outcome.notes) : outcome;
+}
+
+/** Applies a formula to two values if there are both. */
+export function map2<A, B, C>(a: Outcome<A>, b: Outcome<B>, formula: (a: A, b: B) => C): Outcome<C> {
+  if (!a.ok) return a;
+  if (!b.ok) return b;
+  return success(formula(a.value, b.value), joinedNotes(a.notes, b.notes));
+}
+
+/** All the values, if there are all. */
+export function all(outcomes: readonly Outcome<number>[]): Outcome<readonly number[]> {
+  const values: number[] = [];
+  let notes: readonly Note[] = [];
+  for (const outcome of outcomes) {
+    if (!outcome.ok) return outcome;
+    values.push(outcome.value);
+    notes = joinedNotes(notes, outcome.notes);
+  }
+  return success(values, notes);
+}
+
+function joinedNotes(a: readonly Note[], b: readonly Note[]): readonly Note[] {
+  if (a.length === 0) return b;
+  const fresh = b.filter((note) => !a.includes(note));
+  return fresh.length === 0 ? a : [...a, ...fresh];
+}

@@ -1,15 +1,16 @@
 import { h, k } from '../constants';
 import type { Note, Outcome } from '../outcome';
 import { failure, success } from '../outcome';
-import type { GasState, StateRequest, Trial } from './gasState';
+import type { GasState } from './gasState';
 import { gasState } from './gasState';
 import type { ModelError } from './modelErrors';
 import { modelErrors } from './modelErrors';
+import type { StateRequest, Trial } from './request';
 import { stateProperties } from './properties';
 import type { Provenance } from './provenance';
 import { provenanceTable } from './provenance';
 
-export type { StateRequest, Trial } from './gasState';
+export type { StateRequest, Trial } from './request';
 export type { ModelError } from './modelErrors';
 
 /** A value in SI units and how it came about. */

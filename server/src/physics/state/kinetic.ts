@@ -1,8 +1,7 @@
 import { h, k, R } from '../constants';
-import { success } from '../outcome';
+import { map, map2, success } from '../outcome';
 import { measuredDiffusionSource } from '../transport/measuredDiffusion';
 import type { GasState, SpeciesState } from './gasState';
-import { map, map2 } from './gasState';
 import type { StateProperty } from './property';
 import { ofSpecies, overMolecules, total } from './property';
 

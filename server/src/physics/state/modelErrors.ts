@@ -5,7 +5,7 @@ import { conductionMethod } from '../transport/conductivity';
 import type { Correlation } from '../transport/correlation';
 import { heatCapacityRange } from '../thermo/heatCapacity';
 import type { Species } from '../species/species';
-import type { StateRequest } from './gasState';
+import type { StateRequest } from './request';
 
 /** A relative error, 95 %, of a correlation or a method; its key names it among the factors of a trial. */
 export interface ModelError {

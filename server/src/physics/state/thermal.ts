@@ -1,9 +1,9 @@
 import { R } from '../constants';
 import type { Outcome } from '../outcome';
+import { map, map2 } from '../outcome';
 import type { Species } from '../species/species';
 import { conductionMethod } from '../transport/conductivity';
 import type { GasState } from './gasState';
-import { map, map2 } from './gasState';
 import type { Method, StateProperty } from './property';
 import { ofSpecies } from './property';
 
