@@ -8,7 +8,7 @@ export const Ar: Species = {
   viscosity: {
     value: lemmonJacobsen(39.948, 0.335, 143.2, { low: 80, high: 2000 }),
     source: 'Lemmon & Jacobsen 2004',
-    where: 'eqs. 2 and 3, tables I and II',
+    where: 'eqs. 2 and 3, tables I and II; the places from memory',
     uncertainty: 0.01,
   },
   heatCapacity: {

@@ -55,7 +55,7 @@ export const CH4: Species = {
   lennardJones: {
     value: { diameter: 3.758e-10, wellDepth: 148.6 },
     source: 'Svehla 1962',
-    where: 'table I; from memory',
+    where: 'table I; the place from memory',
   },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220' },

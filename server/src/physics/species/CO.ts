@@ -42,7 +42,7 @@ export const CO: Species = {
   lennardJones: {
     value: { diameter: 3.69e-10, wellDepth: 91.7 },
     source: 'Svehla 1962',
-    where: 'table I; from memory',
+    where: 'table I; the place from memory',
   },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220' },

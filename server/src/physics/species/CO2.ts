@@ -53,7 +53,7 @@ export const CO2: Species = {
   lennardJones: {
     value: { diameter: 3.941e-10, wellDepth: 195.2 },
     source: 'Svehla 1962',
-    where: 'table I; from memory',
+    where: 'table I; the place from memory',
   },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

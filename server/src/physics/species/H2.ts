@@ -56,7 +56,7 @@ export const H2: Species = {
   lennardJones: {
     value: { diameter: 2.827e-10, wellDepth: 59.7 },
     source: 'Svehla 1962',
-    where: 'table I; from memory',
+    where: 'table I; the place from memory',
   },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220' },

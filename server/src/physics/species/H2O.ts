@@ -53,7 +53,7 @@ export const H2O: Species = {
   lennardJones: {
     value: { diameter: 2.641e-10, wellDepth: 809.1 },
     source: 'Svehla 1962',
-    where: 'table I; from memory',
+    where: 'table I; the place from memory',
   },
   dipoleMoment: { value: 6.17e-30, source: 'Nelson 1967', where: '1.85 D; from memory' },
   hazards: [],

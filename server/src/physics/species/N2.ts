@@ -10,7 +10,7 @@ export const N2: Species = {
   viscosity: {
     value: viscosity,
     source: 'Lemmon & Jacobsen 2004',
-    where: 'eqs. 2 and 3, tables I and II',
+    where: 'eqs. 2 and 3, tables I and II; the places from memory',
     uncertainty: 0.01,
   },
   conductivity: {
@@ -19,7 +19,7 @@ export const N2: Species = {
       { n: -3.332, t: -0.7 },
     ]),
     source: 'Lemmon & Jacobsen 2004',
-    where: 'eq. 5, table III',
+    where: 'eq. 5, table III; the places from memory',
     uncertainty: 0.02,
   },
   heatCapacity: {
@@ -45,7 +45,7 @@ export const N2: Species = {
   lennardJones: {
     value: { diameter: 3.798e-10, wellDepth: 71.4 },
     source: 'Svehla 1962',
-    where: 'table I; from memory',
+    where: 'table I; the place from memory',
   },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

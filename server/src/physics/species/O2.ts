@@ -10,7 +10,7 @@ export const O2: Species = {
   viscosity: {
     value: viscosity,
     source: 'Lemmon & Jacobsen 2004',
-    where: 'eqs. 2 and 3, tables I and II',
+    where: 'eqs. 2 and 3, tables I and II; the places from memory',
     uncertainty: 0.015,
   },
   conductivity: {
@@ -19,7 +19,7 @@ export const O2: Species = {
       { n: -4.262, t: -0.6 },
     ]),
     source: 'Lemmon & Jacobsen 2004',
-    where: 'eq. 5, table III',
+    where: 'eq. 5, table III; the places from memory',
     uncertainty: 0.02,
   },
   heatCapacity: {

@@ -7,11 +7,16 @@ const viscosity = lemmonJacobsen(28.9586, 0.36, 103.3, { low: 70, high: 2000 });
 export const air: Species = {
   formula: 'air',
   names: ['air', 'dry air'],
-  molarMass: { value: 28.9586e-3, source: 'Lemmon 2000', where: 'table 3, the composition below', uncertainty: 0.0001 },
+  molarMass: {
+    value: 28.9586e-3,
+    source: 'Lemmon 2000',
+    where: 'table 3, the composition below; from memory',
+    uncertainty: 0.0001,
+  },
   viscosity: {
     value: viscosity,
     source: 'Lemmon & Jacobsen 2004',
-    where: 'eqs. 2 and 3, tables I and II',
+    where: 'eqs. 2 and 3, tables I and II; the places from memory',
     uncertainty: 0.01,
   },
   conductivity: {
@@ -20,7 +25,7 @@ export const air: Species = {
       { n: -1.036, t: -0.3 },
     ]),
     source: 'Lemmon & Jacobsen 2004',
-    where: 'eq. 5, table III',
+    where: 'eq. 5, table III; the places from memory',
     uncertainty: 0.02,
   },
   heatCapacity: {
@@ -48,6 +53,6 @@ export const air: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
-  blend: { value: { N2: 0.7812, Ar: 0.0092, O2: 0.2096 }, source: 'Lemmon 2000', where: 'table 3' },
+  blend: { value: { N2: 0.7812, Ar: 0.0092, O2: 0.2096 }, source: 'Lemmon 2000', where: 'table 3; from memory' },
   hazards: [],
 };

@@ -3,6 +3,7 @@ import type { Pairs } from './pairs';
 /**
  * First-order Chapman–Enskog viscosity of a mixture, Pa s (Hirschfelder, Curtiss & Bird 1954, eqs. 8.2-22 to 8.2-24),
  * from mole fractions, molar masses in kg/mol, the species' own viscosities ηᵢ in Pa s, and pair viscosities ηᵢⱼ and Aᵢⱼ*.
+ * Here and beside it, the numbers of the book's equations are from memory.
  * With xᵢ divided out of its rows, the system stays regular where a fraction is zero, and is diagonally dominant.
  */
 export function mixtureViscosity(
