@@ -1,9 +1,11 @@
 import { dimensionless } from '../quantities/dimension';
+import { nearestNames } from '../quantities/nearestNames';
 import { describeDimension } from '../quantities/quantityKinds';
 import type { Between, Comparison, Expression, Is, Logic, Unary, Within } from '../syntax/nodes';
 import { map, multiply, negate, subtract } from './arithmetic';
 import { describeValue, evaluate, evaluateQuantity } from './expression';
 import { mismatch } from './mismatch';
+import { unknownName } from './problems/unknownName';
 import { wrongType } from './problems/wrongType';
 import type { Scope } from './scope';
 import { exact, halfWidth } from './tolerance';
@@ -77,6 +79,11 @@ export function evaluateIs(node: Is, scope: Scope): Verdict | undefined {
     scope.report(
       wrongType.at(node.left.span, { subject: '“is”', wants: 'a word such as a regime', found: describeValue(left) }),
     );
+    return undefined;
+  }
+  if (left.of && !left.of.includes(node.right.text)) {
+    const nearest = nearestNames(node.right.text, left.of);
+    scope.report(unknownName.at(node.right.span, { what: 'such word', name: node.right.text, nearest }));
     return undefined;
   }
   const holds = (left.text === node.right.text) !== node.negated;

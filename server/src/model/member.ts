@@ -17,12 +17,17 @@ import type { Members, Quantity, Record, Value } from './values';
 export function evaluateName(node: Name, scope: Scope, what = 'value'): Value | undefined {
   const found = scope.lookUp(node.text);
   if (found.kind === 'found') return found.value;
-  if (found.kind === 'unknown') {
+  if (found.kind === 'unknown' && NOMINAL_BORE.test(node.text)) {
+    scope.report(notComputedYet.at(node.span, { what: `the nominal bore ${node.text}` }));
+  } else if (found.kind === 'unknown') {
     const nearest = nearestNames(node.text, scope.names());
     scope.report(unknownName.at(node.span, { what, name: node.text, nearest }));
   }
   return undefined;
 }
+
+/** Bores by the flange standards: DN40. */
+const NOMINAL_BORE = /^DN\d+$/;
 
 /** `foreline.bore`, `residual.Ar.partial_pressure`, `const.k` */
 export function evaluateMember(node: Member, scope: Scope): Value | undefined {

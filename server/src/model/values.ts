@@ -21,6 +21,8 @@ export interface Quantity {
 export interface Word {
   readonly kind: 'word';
   readonly text: string;
+  /** The words it could have been, where they are a closed list. */
+  readonly of?: readonly string[];
 }
 
 /** A text in quotes. */

@@ -5,7 +5,7 @@ import { plainNumber, quantity } from '../quantity';
 import type { Scope } from '../scope';
 import type { Figure, Members, Provenance, Quantity, Record } from '../values';
 import { wrongType } from '../problems/wrongType';
-import { regimeOf } from '../regime';
+import { regimeOf, regimes } from '../regime';
 
 /** The results that a site has or will have, for completion and for what is not computed yet. */
 export const siteResults = {
@@ -52,7 +52,7 @@ export function computeSite(state: Record, geometry: Record, span: Span, scope: 
     [
       'regime',
       figure(
-        { kind: 'word', text: regimeOf(knudsen.si, limits) },
+        { kind: 'word', text: regimeOf(knudsen.si, limits), of: regimes },
         {
           ...provenance,
           method: `by the Knudsen number: viscous < ${limits.slip} ≤ slip < ${limits.transitional} ≤ transitional < ${limits.molecular} ≤ molecular`,
