@@ -1,6 +1,6 @@
 import type { Composition } from '../physics/composition';
 import { massFractions, meanMolarMass } from '../physics/composition';
-import { speciesList } from '../physics/species/list';
+import { speciesByName, speciesList } from '../physics/species/list';
 import type { Species } from '../physics/species/species';
 import { dimensionless } from '../quantities/dimension';
 import { nearestNames } from '../quantities/nearestNames';
@@ -49,7 +49,7 @@ export function gasOf(value: Value): Gas | undefined {
 
 /** A built-in gas, by its formula or one of its names. */
 export function builtInGas(name: string): Gas | undefined {
-  const species = speciesByName.get(name);
+  const species = speciesByName(name) ?? speciesByName(name.replaceAll('_', ' '));
   if (!species) return undefined;
   const known = pureGases.get(species.formula) ?? gas([{ species, fraction: plainNumber(1) }]);
   pureGases.set(species.formula, known);
@@ -58,17 +58,10 @@ export function builtInGas(name: string): Gas | undefined {
 
 const pureGases = new Map<string, Gas>();
 
-/** A common name of two words, such as carbon dioxide, is written with an underscore. */
-const speciesByName: ReadonlyMap<string, Species> = new Map(
-  speciesList.flatMap((species) =>
-    [species.formula, ...species.names.map((name) => name.replace(/[^\p{L}\p{N}]+/gu, '_'))].map(
-      (name) => [name, species] as const,
-    ),
-  ),
+/** Every name of a built-in gas, as files write it: a common name of two words takes an underscore. */
+export const gasNames: readonly string[] = speciesList.flatMap(({ formula, names }) =>
+  [formula, ...names].map((name) => name.replaceAll(' ', '_')),
 );
-
-/** Every name of a built-in gas. */
-export const gasNames: readonly string[] = [...speciesByName.keys()];
 
 function reportUnknown(node: Name, scope: Scope): void {
   const nearest = nearestNames(node.text, [...gasNames, ...scope.names()]);
