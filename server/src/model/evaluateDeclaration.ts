@@ -1,6 +1,7 @@
 import { nearestNames } from '../quantities/nearestNames';
 import { describeDimension, describeUnit, kindNamed, quantityKinds } from '../quantities/quantityKinds';
 import type {
+  Declaration,
   DisplayDeclaration,
   Item,
   LineDeclaration,
@@ -23,6 +24,7 @@ import { evaluateName } from './member';
 import { evaluateMixture } from './mixture';
 import { fileNotFound } from './problems/fileNotFound';
 import { missingInput } from './problems/missingInput';
+import { mixedParts } from './problems/mixedParts';
 import { notComputedYet } from './problems/notComputedYet';
 import type { Problem } from './problems/problem';
 import { either } from './problems/problem';
@@ -40,15 +42,24 @@ export function evaluateDeclaration(
   item: Item,
   open: (report: (problem: Problem) => void) => DeclarationScope,
 ): Evaluated {
-  const broken = syntaxProblems(item.declaration);
+  const broken = opensNothing(item.declaration) ? [] : syntaxProblems(item.declaration);
   const problems: Problem[] = [...broken];
   const scope = open((problem) => {
     // What is missing may be what cannot be read.
-    if (broken.length === 0 || problem.code !== missingInput.code) problems.push(problem);
+    if (broken.length === 0 || !MISSING.includes(problem.code)) problems.push(problem);
   });
   const value = valueOf(item, scope);
   return { outcome: outcomeOf(value, problems), problems };
 }
+
+const MISSING = [missingInput.code, mixedParts.code];
+
+/** A line that opens no declaration: the problem is its first word, not all that follows. */
+function opensNothing({ kind, word }: Declaration): boolean {
+  return kind === 'stray' && word.text !== '' && !openingWords.includes(word.text);
+}
+
+const openingWords: readonly string[] = [...statements, ...kinds].map(({ word }) => word);
 
 function outcomeOf(value: Value | 'none' | undefined, problems: readonly Problem[]): Outcome {
   const wrong = problems.some(({ severity, code }) => severity === 'error' && !code.startsWith('requirement-'));
@@ -260,12 +271,11 @@ function evaluateSite(node: SiteDeclaration, scope: DeclarationScope): Value | u
 
 function reportKind(word: Name, scope: DeclarationScope): void {
   if (word.text === '') return;
-  const known = [...statements.map((statement) => statement.word), ...kinds.map((kind) => kind.word)];
-  if (known.includes(word.text)) {
+  if (openingWords.includes(word.text)) {
     scope.report(
       missingInput.at(word.span, { what: `“${word.text}”`, count: 1, of: ['a name'], given: [], fixes: [] }),
     );
     return;
   }
-  scope.report(unknownKind.at(word.span, { word: word.text, nearest: nearestNames(word.text, known) }));
+  scope.report(unknownKind.at(word.span, { word: word.text, nearest: nearestNames(word.text, openingWords) }));
 }

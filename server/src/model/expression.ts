@@ -12,7 +12,7 @@ import {
   evaluateNot,
   evaluateWithin,
 } from './comparison';
-import { offsetLiteral, readLiteral, readUnit } from './literal';
+import { gaugeLiteral, offsetLiteral, readLiteral, readUnit } from './literal';
 import { evaluateMember, evaluateName } from './member';
 import { ambiguousTemperature } from './problems/ambiguousTemperature';
 import { noValue } from './problems/noValue';
@@ -103,19 +103,20 @@ export function describeValue(value: Value): string {
 function evaluateUnary(node: Unary, scope: Scope): Value | undefined {
   if (node.operator === 'not') return evaluateNot(node, scope);
   // The sign of −5 °C belongs to the reading on the scale, not to the kelvins.
-  if (node.operator === '-' && offsetLiteral(node.operand)) return negativeReading(node.operand, scope);
+  if (node.operator === '-' && (offsetLiteral(node.operand) ?? gaugeLiteral(node.operand)))
+    return negativeReading(node.operand, node, scope);
   const operand = evaluateQuantity(node.operand, scope, 'a sign');
   return operand && node.operator === '-' ? negate(operand) : operand;
 }
 
-function negativeReading(node: Expression, scope: Scope): Value | undefined {
+function negativeReading(node: Expression, minus: Unary, scope: Scope): Value | undefined {
   switch (node.kind) {
     case 'number':
-      return readLiteral(node, scope, 'value', -1);
+      return readLiteral(node, scope, 'value', minus);
     case 'group':
-      return negativeReading(node.inner, scope);
+      return negativeReading(node.inner, minus, scope);
     case 'tolerance':
-      return evaluateTolerance(node, scope, (value) => negativeReading(value, scope));
+      return evaluateTolerance(node, scope, (value) => negativeReading(value, minus, scope));
     default:
       return evaluate(node, scope);
   }

@@ -7,7 +7,7 @@ import { describeValue, evaluate } from './expression';
 import type { Bound, Key, Kind } from './kinds/kind';
 import { literalOf, mismatch } from './mismatch';
 import { evaluateMixture, gasOf } from './mixture';
-import { checkNeeds } from './needs';
+import { checkNeeds, removal } from './needs';
 import { absoluteZero } from './problems/absoluteZero';
 import { duplicateKey } from './problems/duplicateKey';
 import { outOfBounds } from './problems/outOfBounds';
@@ -28,6 +28,7 @@ export function readInputs(
 ): ReadonlyMap<string, Value> | undefined {
   const own = new Map<string, Value>();
   const entries = new Map<string, Entry>();
+  const misspelt: string[] = [];
   let sound = true;
   for (const item of node.block?.items ?? []) {
     if (item.kind !== 'entry') continue;
@@ -38,9 +39,10 @@ export function readInputs(
         kind.keys.map(({ name }) => name),
       );
       scope.report(unknownKey.at(item.key.span, { what: kind.title, key: item.key.text, nearest }));
+      misspelt.push(...nearest);
       sound = false;
     } else if (entries.has(key.name)) {
-      scope.report(duplicateKey.at(item.key.span, { key: key.name, entry: item.span }));
+      scope.report(duplicateKey.at(item.key.span, { key: key.name, removal: removal(node, item) }));
     } else {
       entries.set(key.name, item);
       const value = readInput(item, key, scope);
@@ -49,7 +51,7 @@ export function readInputs(
     }
   }
   const given = [...entries.keys()];
-  const complete = checkNeeds(node, kind, { given, inherited: [...inherited.keys()], entries }, scope);
+  const complete = checkNeeds(node, kind, { given, misspelt, inherited: [...inherited.keys()], entries }, scope);
   return sound && complete ? new Map([...replacedBy(given, kind, inherited), ...own]) : undefined;
 }
 

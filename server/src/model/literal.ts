@@ -1,8 +1,7 @@
 import { toSI, toSIDifference, fromSI } from '../quantities/conversion';
-import { formatNumber } from '../quantities/format';
 import type { Unit, UnitFault } from '../quantities/parseUnit';
 import { parseUnit, unitOf } from '../quantities/parseUnit';
-import type { Expression, NumberLiteral, UnitText } from '../syntax/nodes';
+import type { Expression, NumberLiteral, Span, Unary, UnitText } from '../syntax/nodes';
 import { ambiguousTemperature } from './problems/ambiguousTemperature';
 import { absoluteZero } from './problems/absoluteZero';
 import { decimalComma } from './problems/decimalComma';
@@ -17,20 +16,21 @@ import type { Quantity } from './values';
 export type LiteralRole = 'value' | 'difference';
 
 /**
- * Reads a number with its unit. Offset temperatures and gauge pressures are converted here, sign included, because
- * they are points on a scale: in the algebra there are only kelvin and absolute pressures.
+ * Reads a number with its unit. Offset temperatures and gauge pressures are converted here, with the minus before them,
+ * because they are points on a scale: in the algebra there are only kelvin and absolute pressures.
  */
 export function readLiteral(
   node: NumberLiteral,
   scope: Scope,
   role: LiteralRole = 'value',
-  sign: 1 | -1 = 1,
+  minus?: Unary,
 ): Quantity | undefined {
   if (node.comma) {
     scope.report(decimalComma.at(node.digits, { digits: node.text, inList: false }));
     return undefined;
   }
-  const value = sign * node.value;
+  const value = minus ? -node.value : node.value;
+  const span = minus ? { start: minus.span.start, end: node.span.end } : node.span;
   if (!node.unit) return plainNumber(value);
   const unit = readUnit(node.unit, scope);
   if (!unit) return undefined;
@@ -38,9 +38,9 @@ export function readLiteral(
     return { ...quantity(toSIDifference(value, unit, reference(unit, scope)), unit.dimension), ...keptUnit(unit) };
   switch (unit.kind) {
     case 'gauge':
-      return readGauge(node, value, unit, scope);
+      return readGauge(span, value, unit, scope);
     case 'offset':
-      return readOffset(node, value, unit, scope);
+      return readOffset(span, value, unit, scope);
     case 'plain':
     case 'standard-flow':
       return { ...quantity(toSI(value, unit, reference(unit, scope)), unit.dimension), unit };
@@ -73,21 +73,26 @@ export function offsetLiteral(node: Expression): NumberLiteral | undefined {
   }
 }
 
-function readGauge(node: NumberLiteral, value: number, unit: Unit, scope: Scope): Quantity {
+/** Whether an expression is a literal such as `2 barg`. In parentheses it is an absolute pressure already. */
+export function gaugeLiteral(node: Expression): NumberLiteral | undefined {
+  if (node.kind === 'tolerance') return gaugeLiteral(node.value);
+  const unit = node.kind === 'number' && node.unit ? parseUnit(node.unit.text) : undefined;
+  return node.kind === 'number' && unit?.ok && unit.unit.kind === 'gauge' ? node : undefined;
+}
+
+function readGauge(span: Span, value: number, unit: Unit, scope: Scope): Quantity {
   const ambient = scope.condition('ambient_pressure');
   const si = toSI(value, unit) + ambient.si;
   const absoluteUnit = unitOf(unit.text === 'barg' ? 'bar' : 'psi');
-  const absolute = `${formatNumber(fromSI(si, absoluteUnit), 5)} ${absoluteUnit.text}`;
-  scope.report(gaugePressure.at(node.span, { ambient: show(ambient, { unit: unitOf('kPa') }), absolute }));
+  const absolute = `${String(Number(fromSI(si, absoluteUnit).toPrecision(8)))} ${absoluteUnit.text}`;
+  scope.report(gaugePressure.at(span, { ambient: show(ambient, { unit: unitOf('kPa') }), absolute }));
   return { ...quantity(si, unit.dimension, ambient.leans), unit: absoluteUnit };
 }
 
-function readOffset(node: NumberLiteral, value: number, unit: Unit, scope: Scope): Quantity | undefined {
+function readOffset(span: Span, value: number, unit: Unit, scope: Scope): Quantity | undefined {
   const si = toSI(value, unit);
   if (!(si > 0)) {
-    scope.report(
-      absoluteZero.at(node.span, { subject: 'the temperature', value: `${formatNumber(value, 6)} ${unit.text}` }),
-    );
+    scope.report(absoluteZero.at(span, { subject: 'the temperature', value: `${String(value)} ${unit.text}` }));
     return undefined;
   }
   return { ...quantity(si, unit.dimension), unit };

@@ -8,6 +8,8 @@ import type { Scope } from './scope';
 
 export interface GivenKeys {
   readonly given: readonly string[];
+  /** What unknown keys may have been meant for: these are not missing, only misspelt. */
+  readonly misspelt: readonly string[];
   /** Given by the declaration that this one starts from; what is given anew replaces it. */
   readonly inherited: readonly string[];
   readonly entries: ReadonlyMap<string, Entry>;
@@ -25,6 +27,7 @@ function checkNeed(node: ThingDeclaration, kind: Kind, need: Need, keys: GivenKe
   const total = own.length + kept.length;
   if (total === count) return true;
   if (total < count) {
+    if (of.some((name) => keys.misspelt.includes(name) && !own.includes(name))) return false;
     const fixes = of.filter((name) => !own.includes(name)).map((name) => addition(node, kind, name));
     scope.report(
       missingInput.at(node.name.span, {
@@ -66,7 +69,8 @@ export function entryEdit(node: ThingDeclaration, text: string): Edit {
   return { span: { start: last.span.end, end: last.span.end }, text: sameLine ? `, ${text}` : `\n  ${text}` };
 }
 
-function removal(node: ThingDeclaration, entry: Entry): Fix {
+/** Takes an entry out together with what separates it from its neighbour. */
+export function removal(node: ThingDeclaration, entry: Entry): Fix {
   const items = node.block?.items ?? [];
   const index = items.indexOf(entry);
   const next = items[index + 1];

@@ -1,7 +1,6 @@
 import { dimensionless } from '../quantities/dimension';
 import { describeDimension } from '../quantities/quantityKinds';
 import { formatNumber } from '../quantities/format';
-import { unitOf } from '../quantities/parseUnit';
 import type { Expression, Tolerance } from '../syntax/nodes';
 import { evaluate, evaluateQuantity } from './expression';
 import { offsetLiteral, readLiteral } from './literal';
@@ -58,7 +57,7 @@ function halfWidthOf(node: Tolerance, value: Quantity, width: Quantity, scope: S
     const why = `of a temperature in ${value.unit.text} may be meant of the reading or of the kelvins; write the half-width in K`;
     scope.report(
       ambiguousTemperature.at(node.halfWidth.span, {
-        written: `± ${show(width, { unit: unitOf('%') })}`,
+        written: `± ${String(Number((100 * width.si).toPrecision(4)))} %`,
         why,
         readings,
       }),

@@ -1,5 +1,5 @@
 import type { Fix } from './problem';
-import { defineProblem, either } from './problem';
+import { defineProblem, either, numeral } from './problem';
 
 export const missingInput = defineProblem<{
   what: string;
@@ -21,7 +21,3 @@ export const missingInput = defineProblem<{
   },
   fixes: ({ fixes }) => fixes,
 });
-
-function numeral(count: number): string {
-  return ['none', 'one', 'two', 'three'][count] ?? String(count);
-}

@@ -87,3 +87,7 @@ export function either(words: readonly string[], conjunction = 'or'): string {
   if (words.length < 2) return words.join('');
   return `${words.slice(0, -1).join(', ')} ${conjunction} ${words.at(-1) ?? ''}`;
 }
+
+export function numeral(count: number): string {
+  return ['none', 'one', 'two', 'three'][count] ?? String(count);
+}

@@ -1,5 +1,5 @@
 import type { Fix } from './problem';
-import { defineProblem, either } from './problem';
+import { defineProblem, either, numeral } from './problem';
 
 export const surplusInput = defineProblem<{
   what: string;
@@ -12,6 +12,6 @@ export const surplusInput = defineProblem<{
   title: 'More inputs than needed',
   doc: 'The inputs over-determine the declaration: they could contradict each other. Keep as many as it needs; the rest is computed from them.',
   message: ({ what, count, given }) =>
-    `${what} takes ${count === 1 ? 'one' : String(count)} of ${either(given, 'and')}; remove ${given.length - count === 1 ? 'one' : 'some'}`,
+    `${what} takes ${numeral(count)} of ${either(given, 'and')}; remove ${given.length - count === 1 ? 'one' : 'some'}`,
   fixes: ({ fixes }) => fixes,
 });
