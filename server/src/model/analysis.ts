@@ -1,6 +1,6 @@
-import type { File } from '../syntax/nodes';
+import type { File, Item } from '../syntax/nodes';
 import type { Declared } from './declare';
-import type { Document } from './document';
+import type { Document, Shape } from './document';
 import type { Evaluated, Outcome } from './evaluated';
 import type { Evaluation, Place } from './evaluation';
 import { circularDefinition } from './problems/circularDefinition';
@@ -68,7 +68,7 @@ function allProblems(
       ...duplicate(document, declared),
       ...circular(evaluation.circleOf({ document, declared }), declared),
     ];
-    if (declared.name && unused.has(declared))
+    if (declared.name && unused.has(declared.id))
       own.push(unusedDeclaration.at(declared.name.span, { name: declared.name.text }));
     return own.map((problem) => ({ problem, offset: declared.item.offset, declared }));
   });
@@ -98,22 +98,30 @@ function relatedTo({ document, declared }: Place, message: string): Related {
   return { message, uri: document.uri, offset: declared.item.offset + start, length: end - start };
 }
 
-/** Definitions that nothing reads. A file of definitions alone is there to be used by others. */
-function unusedDeclarations({ declarations, file }: Document): ReadonlySet<Declared> {
-  const definition = ({ item }: Declared) =>
-    ['let', 'gas'].includes(item.declaration.kind) || item.declaration.word.text === 'species';
-  const results = file.items.some(
-    ({ declaration }) =>
-      ['require', 'site'].includes(declaration.kind) ||
-      (declaration.kind === 'thing' && declaration.word.text !== 'species'),
-  );
-  if (!results) return new Set();
+const unusedByShape = new WeakMap<Shape, ReadonlySet<string>>();
+
+/** Definitions that nothing reads, by their identity. A file of definitions alone is there to be used by others. */
+function unusedDeclarations({ declarations, file, shape }: Document): ReadonlySet<string> {
+  const before = unusedByShape.get(shape);
+  if (before) return before;
   const used = new Set(
     declarations.all.flatMap(({ item, name }) =>
       references(item.declaration).flatMap(({ text }) => (text === name?.text ? [] : [text])),
     ),
   );
-  return new Set(
-    declarations.all.filter((declared) => definition(declared) && declared.name && !used.has(declared.name.text)),
+  const idle = declarations.all.filter(
+    (declared) => isDefinition(declared) && declared.name && !used.has(declared.name.text),
   );
+  const found = new Set(file.items.some(givesResults) ? idle.map(({ id }) => id) : []);
+  unusedByShape.set(shape, found);
+  return found;
+}
+
+function isDefinition({ item }: Declared): boolean {
+  const { kind, word } = item.declaration;
+  return kind === 'let' || kind === 'gas' || word.text === 'species';
+}
+
+function givesResults({ declaration: { kind, word } }: Item): boolean {
+  return kind === 'require' || kind === 'site' || (kind === 'thing' && word.text !== 'species');
 }

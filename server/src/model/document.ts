@@ -1,13 +1,14 @@
 import { parseUnit } from '../quantities/parseUnit';
 import type { Unit } from '../quantities/parseUnit';
 import { kindNamed } from '../quantities/quantityKinds';
-import type { File } from '../syntax/nodes';
+import type { File, Name } from '../syntax/nodes';
 import { createParser } from '../syntax/parse';
 import type { Declarations } from './declare';
 import { declare } from './declare';
 import type { Outcome } from './evaluated';
 import type { Problem } from './problems/problem';
 import type { DisplayUnits } from './quantity';
+import { references } from './references';
 
 /** One file as the workspace keeps it: its text, what that declares, and what its declarations gave the last time they ran. */
 export interface Document {
@@ -15,12 +16,17 @@ export interface Document {
   readonly text: string;
   readonly file: File;
   readonly declarations: Declarations;
+  /** Which declaration uses which names: the same object as long as that stays the same. */
+  readonly shape: Shape;
   readonly display: DisplayUnits;
   /** The `use` declarations in order. */
   readonly uses: readonly Use[];
   /** What was evaluated, by the identity of the declaration. It goes with the document. */
   readonly memo: Map<string, MemoEntry>;
 }
+
+/** For each declaration its identity and the names it uses. */
+export type Shape = readonly { readonly id: string; readonly uses: readonly Name[] }[];
 
 export interface Use {
   readonly path: string;
@@ -52,8 +58,17 @@ export function createDocument(uri: string, resolve: (path: string) => string): 
     const declarations = declare(file);
     const display = displayUnits(file);
     const uses = usesOf(file).map((path) => ({ path, uri: resolve(path) }));
-    const kept = before && sameUnits(before.display, display) ? before.display : display;
-    before = { uri, text, file, declarations, display: kept, uses, memo };
+    const shape = declarations.all.map(({ id, item }) => ({ id, uses: references(item.declaration) }));
+    before = {
+      uri,
+      text,
+      file,
+      declarations,
+      shape: before && sameShape(before.shape, shape) ? before.shape : shape,
+      display: before && sameUnits(before.display, display) ? before.display : display,
+      uses,
+      memo,
+    };
     return before;
   };
 }
@@ -73,6 +88,20 @@ function displayUnits(file: File): DisplayUnits {
 
 function sameUnits(a: DisplayUnits, b: DisplayUnits): boolean {
   return a.size === b.size && [...a].every(([kind, unit]) => b.get(kind) === unit);
+}
+
+function sameShape(a: Shape, b: Shape): boolean {
+  return (
+    a.length === b.length &&
+    a.every(({ id, uses }, index) => {
+      const other = b[index];
+      return other !== undefined && id === other.id && (uses === other.uses || sameNames(uses, other.uses));
+    })
+  );
+}
+
+function sameNames(a: readonly Name[], b: readonly Name[]): boolean {
+  return a.length === b.length && a.every(({ text }, index) => text === b[index]?.text);
 }
 
 function usesOf(file: File): string[] {

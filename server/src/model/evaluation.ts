@@ -8,11 +8,10 @@ import type { Document, Read } from './document';
 import { evaluateDeclaration } from './evaluateDeclaration';
 import type { Evaluated, Outcome } from './evaluated';
 import { failed, sameOutcome } from './evaluated';
-import { components } from './graph';
 import { builtInGas, gasNames } from './mixture';
 import type { Problem } from './problems/problem';
-import { references } from './references';
 import type { DeclarationScope, Lookup } from './scope';
+import { survey } from './survey';
 import type { Quantity } from './values';
 
 /** A declaration in its document. */
@@ -45,7 +44,7 @@ export function createEvaluation(sight: Sight): Evaluation {
   const done = new Map<Declared, Evaluated>();
   const running = new Set<Declared>();
   const circles = new Map<Declared, readonly Place[]>();
-  const surveyed = new Set<Document>();
+  const prepared = new Set<Document>();
   const ran: string[] = [];
 
   const find = (document: Document, name: string): Place | undefined => {
@@ -60,7 +59,7 @@ export function createEvaluation(sight: Sight): Evaluation {
   };
 
   const evaluated = (place: Place): Evaluated => {
-    survey(place.document);
+    prepare(place.document);
     const before = done.get(place.declared);
     if (before) return before;
     if (running.has(place.declared)) circles.set(place.declared, [place]);
@@ -74,29 +73,13 @@ export function createEvaluation(sight: Sight): Evaluation {
     return final;
   };
 
-  /** Finds the circles and evaluates dependencies first, so that a long chain needs no deep stack. */
-  const survey = (document: Document) => {
-    if (surveyed.has(document)) return;
-    surveyed.add(document);
-    const places = new Map<Declared, Place>();
-    const successors = (declared: Declared): readonly Declared[] => {
-      const own = places.get(declared)?.document ?? document;
-      return references(declared.item.declaration).flatMap(({ text }) => {
-        const target = find(own, text);
-        if (!target) return [];
-        places.set(target.declared, target);
-        return [target.declared];
-      });
-    };
-    for (const declared of document.declarations.all) places.set(declared, { document, declared });
-    const order = components(document.declarations.all, successors);
-    for (const group of order) {
-      const [only] = group;
-      if (!only || (group.length === 1 && !successors(only).includes(only))) continue;
-      const members = group.flatMap((each) => places.get(each) ?? []);
-      for (const member of group) circles.set(member, members);
-    }
-    for (const group of order) for (const declared of group) evaluated(places.get(declared) ?? { document, declared });
+  /** Dependencies are evaluated first, so that a long chain needs no deep stack. */
+  const prepare = (document: Document) => {
+    if (prepared.has(document)) return;
+    prepared.add(document);
+    const { order, circles: found } = survey(document, find);
+    for (const circle of found) for (const { declared } of circle) circles.set(declared, circle);
+    for (const place of order) evaluated(place);
   };
 
   const remembered = ({ document, declared }: Place): Evaluated | undefined => {

@@ -1,9 +1,16 @@
+/** A strongly connected component: one node, or several that all lead to one another. */
+export interface Component<Node> {
+  readonly members: readonly Node[];
+  /** Whether a member leads to itself, directly or through others. */
+  readonly circular: boolean;
+}
+
 /** Strongly connected components, dependencies first (Tarjan 1972), without recursion: a file may be one long chain. */
 export function components<Node>(
   nodes: Iterable<Node>,
   successors: (node: Node) => readonly Node[],
-): readonly (readonly Node[])[] {
-  const found: (readonly Node[])[] = [];
+): readonly Component<Node>[] {
+  const found: Component<Node>[] = [];
   const visits = new Map<Node, Visit<Node>>();
   const stack: Visit<Node>[] = [];
 
@@ -51,8 +58,11 @@ function enter<Node>(
   return visit;
 }
 
-function take<Node>(root: Visit<Node>, stack: Visit<Node>[]): readonly Node[] {
-  const members = stack.splice(stack.indexOf(root));
-  for (const member of members) member.open = false;
-  return members.map(({ node }) => node);
+function take<Node>(root: Visit<Node>, stack: Visit<Node>[]): Component<Node> {
+  const visits = stack.splice(stack.indexOf(root));
+  for (const visit of visits) visit.open = false;
+  return {
+    members: visits.map(({ node }) => node),
+    circular: visits.length > 1 || root.successors.includes(root.node),
+  };
 }
