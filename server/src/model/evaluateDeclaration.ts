@@ -133,7 +133,7 @@ function evaluateThing(node: ThingDeclaration, scope: DeclarationScope): Value |
   }
   const head = readHead(node, kind, scope);
   reportForeignItems(node, kind, scope);
-  const inputs = readInputs(node, kind, scope, head?.from?.inputs);
+  const inputs = readInputs(node, kind, scope, head ? head.from?.inputs : inheritedUnknown(node));
   if (!kind.compute) {
     scope.report(notComputedYet.at(node.word.span, { what: kind.title }));
     return { kind: 'pending', word: kind.word };
@@ -141,6 +141,11 @@ function evaluateThing(node: ThingDeclaration, scope: DeclarationScope): Value |
   if (!head || !inputs) return undefined;
   const record = kind.compute({ node, inputs, ...head, place: (key) => placeOf(node, key) }, scope);
   return record ?? undefined;
+}
+
+/** A declaration `from` something that cannot be read. */
+function inheritedUnknown({ head }: ThingDeclaration): 'unknown' | undefined {
+  return head?.relation.text === 'from' ? 'unknown' : undefined;
 }
 
 interface ReadHead {

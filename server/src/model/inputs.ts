@@ -24,7 +24,7 @@ export function readInputs(
   node: ThingDeclaration,
   kind: Kind,
   scope: Scope,
-  inherited: ReadonlyMap<string, Value> = new Map(),
+  inherited: ReadonlyMap<string, Value> | 'unknown' = new Map(),
 ): ReadonlyMap<string, Value> | undefined {
   const own = new Map<string, Value>();
   const entries = new Map<string, Entry>();
@@ -50,6 +50,8 @@ export function readInputs(
       else sound = false;
     }
   }
+  // What is missing may come from the declaration that this one starts from.
+  if (inherited === 'unknown') return undefined;
   const given = [...entries.keys()];
   const complete = checkNeeds(node, kind, { given, misspelt, inherited: [...inherited.keys()], entries }, scope);
   return sound && complete ? new Map([...replacedBy(given, kind, inherited), ...own]) : undefined;

@@ -50,7 +50,8 @@ export function describeVerdict(verdict: Verdict, condition: Expression, text: s
   );
   const explained = named && limits.length > 0 ? ` (${limits.join(', ')})` : '';
   const is = subject === value ? '' : `${subject} is `;
-  return `${is}${value}; wanted ${wanted}${explained}`;
+  const not = verdict.negated ? 'not ' : '';
+  return `${is}${value}; wanted ${not}${wanted}${explained}`;
 }
 
 function relationAt(condition: Expression, { relation }: Verdict): Expression | undefined {

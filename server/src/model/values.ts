@@ -66,6 +66,8 @@ export interface Verdict {
   readonly leans: Leans;
   /** The simple condition that decided, within the declaration. */
   readonly relation?: Span;
+  /** Whether that condition stands under a “not”. */
+  readonly negated?: boolean;
 }
 
 /** One side of a condition: a quantity with the word that leads it in, or a bare word. */
