@@ -1,0 +1,3 @@
+import { startNodeServer } from './lsp/nodeServer';
+
+startNodeServer();
