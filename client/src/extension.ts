@@ -3,6 +3,7 @@ import { commands } from './commands';
 import { createLanguageServer } from './languageServer';
 import type { LanguageServer, MakeClient } from './languageServer';
 import { newFile } from './newFile';
+import { registerPages } from './pages';
 import { createStatusItem, showState } from './statusItem';
 import { toggleHints } from './toggleHints';
 
@@ -17,6 +18,7 @@ export function startExtension(context: vscode.ExtensionContext, makeClient: Mak
   context.subscriptions.push(
     log,
     status,
+    registerPages(server),
     server.onDidChangeState((state) => showState(status, state)),
     vscode.commands.registerCommand(commands.newFile, (wanted: unknown) => newFile(context.extensionUri, wanted)),
     vscode.commands.registerCommand(commands.toggleHints, () => toggleHints(context.globalState)),

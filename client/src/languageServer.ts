@@ -1,7 +1,9 @@
 import * as vscode from 'vscode';
 import { RevealOutputChannelOn, State } from 'vscode-languageclient';
 import type { BaseLanguageClient, LanguageClientOptions } from 'vscode-languageclient';
+import type { ClientOptions } from '../../server/src/lsp/messages';
 import { restartAFewTimes } from './restartPolicy';
+import { serveWorkspaceFiles } from './workspaceFiles';
 
 /** Desktop and web differ only in how a client and its server are made. */
 export type MakeClient = (options: LanguageClientOptions) => BaseLanguageClient;
@@ -16,6 +18,8 @@ export interface LanguageServer {
   /** Settles with whether the server answers. */
   start(): Promise<boolean>;
   stop(): Promise<void>;
+  /** Asks the server; undefined while there is none. */
+  request<R>(method: string, params: unknown): Promise<R | undefined>;
 }
 
 /**
@@ -31,6 +35,7 @@ export function createLanguageServer(makeClient: MakeClient, log: vscode.LogOutp
     const started = makeClient(clientOptions(log));
     client = started;
     logInsteadOfToast(started);
+    serveWorkspaceFiles(started);
     started.onDidChangeState(({ newState }) => {
       if (client === started) states.fire(describeState(newState, started));
     });
@@ -60,6 +65,10 @@ export function createLanguageServer(makeClient: MakeClient, log: vscode.LogOutp
     onDidChangeState: states.event,
     start: () => inTurn(startNow),
     stop: () => inTurn(stopNow),
+    request: async <R>(method: string, params: unknown) => {
+      await lastStep;
+      return client?.isRunning() ? client.sendRequest<R>(method, params) : undefined;
+    },
   };
 }
 
@@ -69,6 +78,7 @@ function clientOptions(log: vscode.LogOutputChannel): LanguageClientOptions {
     documentSelector: [{ language: 'tenuity' }],
     outputChannel: log,
     revealOutputChannelOn: RevealOutputChannelOn.Never,
+    initializationOptions: { pages: true, files: true } satisfies ClientOptions,
     markdown: { isTrusted: false, supportHtml: false },
     errorHandler: restartAFewTimes(() => Date.now()),
     initializationFailedHandler: () => false,
