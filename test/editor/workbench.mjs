@@ -78,10 +78,12 @@ export async function openProblems(page) {
   return page.locator('.markers-panel .monaco-list-row');
 }
 
-/** Saves; ends when the tab no longer shows that something is unsaved. */
+/** Saves what is unsaved; ends when the tab no longer shows that something is. */
 export async function save(page) {
+  const tab = page.locator('.tabs-container .tab.active');
+  await tab.and(page.locator('.dirty')).waitFor();
   await page.keyboard.press('Control+S');
-  await page.locator('.tabs-container .tab.active:not(.dirty)').waitFor();
+  await tab.and(page.locator(':not(.dirty)')).waitFor();
 }
 
 export function readable(text) {

@@ -21,6 +21,7 @@ const QUIET = {
   'extensions.ignoreRecommendations': true,
   'chat.disableAIFeatures': true,
   'git.enabled': false,
+  'files.autoSave': 'off', // As on a desktop; in a browser VS Code would save by itself.
 };
 
 /** Installs VS Code beside this file; at once when it is there already. */

@@ -7,6 +7,7 @@ const EXTENSION = 'tenuity.tenuity';
 
 /** As many code actions as this arrive with their edit worked out. */
 const ALL_RESOLVED = 100;
+const ATTEMPTS = 10;
 
 /** Ends when the language server has told of a problem, so that it answers everything asked afterwards. */
 export async function startTenuity(): Promise<void> {
@@ -68,16 +69,21 @@ export async function hoverAt(document: vscode.TextDocument, place: vscode.Range
     .join('\n');
 }
 
-/** The quick fixes that the editor offers at a place. */
+/**
+ * The quick fixes that the editor offers at a place. VS Code drops all answers when any extension registers a provider
+ * of fixes meanwhile, as its own do in the first seconds; so it is asked again a few times.
+ */
 export async function quickFixes(document: vscode.TextDocument, place: vscode.Range): Promise<vscode.CodeAction[]> {
-  const actions = await vscode.commands.executeCommand<vscode.CodeAction[]>(
-    'vscode.executeCodeActionProvider',
-    document.uri,
-    place,
-    vscode.CodeActionKind.QuickFix.value,
-    ALL_RESOLVED,
-  );
-  return actions.filter((action) => action.edit !== undefined);
+  for (let attempt = 1; ; attempt++) {
+    const actions = await vscode.commands.executeCommand<vscode.CodeAction[]>(
+      'vscode.executeCodeActionProvider',
+      document.uri,
+      place,
+      vscode.CodeActionKind.QuickFix.value,
+      ALL_RESOLVED,
+    );
+    if (actions.length > 0 || attempt === ATTEMPTS) return actions.filter((action) => action.edit !== undefined);
+  }
 }
 
 function findDiagnostic(document: vscode.TextDocument, code: string): vscode.Diagnostic | undefined {
