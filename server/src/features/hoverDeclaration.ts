@@ -16,12 +16,13 @@ import { sentence } from './hoverWord';
 /** A declaration: what its author says of it, its results, and what stands behind them. */
 export function hoverDeclaration(place: HoverPlace): string | undefined {
   const { analysis, declared } = place;
-  const { doc } = declared.item;
+  const { declaration, doc } = declared.item;
+  if (declaration.kind === 'thing' && !kindOfWord(declaration.word.text)) return undefined;
   const outcome = analysis.outcome(declared);
   const head = [titleOf(declared), doc === undefined ? undefined : plainText(shortened(doc, 2000))];
   if (outcome.kind !== 'value') return paragraphs([...head, meaningNote(place), noValueNote(analysis, declared)]);
-  const { word } = declared.item.declaration;
-  const meaning = place.path.at(-1) === word && outcome.value.kind !== 'pending' ? meaningNote(place) : undefined;
+  const meaning =
+    place.path.at(-1) === declaration.word && outcome.value.kind !== 'pending' ? meaningNote(place) : undefined;
   return paragraphs([...head, meaning, ...valueParts(outcome.value, place)]);
 }
 

@@ -5,6 +5,7 @@ import { kindOfWord } from '../model/kinds/list';
 import { statements } from '../model/kinds/statements';
 import { show } from '../model/quantity';
 import { regimes } from '../model/regime';
+import { formatNumber } from '../quantities/format';
 import { kindNamed } from '../quantities/quantityKinds';
 import type { Name } from '../syntax/nodes';
 import { bold, paragraphs, plainText } from './hoverMarkdown';
@@ -73,7 +74,8 @@ export function hoverRegime({ text }: Name, { scope }: HoverPlace): string | und
 
 function limits(scope: HoverPlace['scope']): string {
   const { slip, transitional, molecular } = scope.regimeLimits();
-  return `viscous < ${slip} ≤ slip < ${transitional} ≤ transitional < ${molecular} ≤ molecular`;
+  const [low, middle, high] = [slip, transitional, molecular].map((limit) => formatNumber(limit, 2));
+  return `viscous < ${low} ≤ slip < ${middle} ≤ transitional < ${high} ≤ molecular`;
 }
 
 /** A meaning as a sentence of its own. */
