@@ -12,12 +12,15 @@ export interface Annotation {
   readonly text?: string;
 }
 
-/** A document without its caret lines, and what those state. */
+/** A document without its caret lines and the mark `<*>`, and what those say. */
 export interface Annotated {
   readonly text: string;
   readonly annotations: readonly Annotation[];
+  /** Where the mark stood. */
+  readonly cursor?: number;
 }
 
+const MARK = '<*>';
 const CARETS = /^( *)#( *)(\^+) +(error|warning|information|hint) +([a-z-]+)(?:: (.+))?$/;
 
 /**
@@ -36,16 +39,21 @@ export function readAnnotations(lines: readonly string[]): Annotated {
     }
     const [, indent = '', gap = '', carets = '', severity, code = '', text] = match;
     if (kept.length === 0) throw new Error(`a caret line has no line above: ${line}`);
+    const column = indent.length + (gap === '' ? 0 : 1 + gap.length);
+    const marked = kept.at(-1)?.indexOf(MARK) ?? -1;
+    const unmarked = (at: number) => (marked < 0 || at <= marked ? at : at - MARK.length);
     annotations.push({
       line: kept.length - 1,
-      column: indent.length + (gap === '' ? 0 : 1 + gap.length),
-      width: carets.length,
+      column: unmarked(column),
+      width: unmarked(column + carets.length) - unmarked(column),
       severity: severity as Severity,
       code,
       ...(text === undefined ? {} : { text }),
     });
   }
-  return { text: kept.join('\n'), annotations };
+  const text = kept.join('\n');
+  const cursor = text.indexOf(MARK);
+  return cursor < 0 ? { text, annotations } : { text: text.replace(MARK, ''), annotations, cursor };
 }
 
 /** A problem as a caret line would state it: of several lines only the first, and an empty place as one column. */

@@ -3,9 +3,10 @@ import { readFileSync, writeFileSync } from 'node:fs';
 import type { Analysis } from '../../server/src/model/analysis';
 import { annotate, annotationOf, asStated, readAnnotations } from './annotations';
 import type { Annotated } from './annotations';
-import { applyFix, changedLines, fixNamed } from './fixes';
 import type { Block, Section } from './markdown';
 import { emptySections, readSections, rewrite } from './markdown';
+import type { Subject } from './shows';
+import { shows } from './shows';
 import { MAIN, addressOf, textsOf, workspaceOf } from './workspace';
 
 /**
@@ -14,6 +15,9 @@ import { MAIN, addressOf, textsOf, workspaceOf } from './workspace';
  *
  * - ```` ```file NAME ```` another file, for `use`; it belongs to the whole section
  * - ```` ```fix CODE "TITLE" ```` the document after that fix, or the lines of it that changed
+ * - ```` ```hover ```` what hovering over the mark `<*>` shows, after the highlighted text in brackets
+ * - ```` ```hints ```` the lines that have a hint, with it in guillemets
+ * - ```` ```tree ```` the syntax tree
  *
  * `ONLY="heading"` runs the tests with that in their heading; `UPDATE=1` rewrites what a block shows, never the carets.
  */
@@ -48,12 +52,6 @@ interface Change {
   readonly text: string;
 }
 
-/** A document of a section, with everything that its later blocks need. */
-interface Subject {
-  readonly document: Annotated;
-  readonly analysis: Analysis;
-}
-
 function runSection({ blocks }: Section, changes: Change[]): void {
   const files = new Map(
     blocks.filter(({ word }) => word === 'file').map((block) => [block.argument, readAnnotations(block.lines)]),
@@ -84,17 +82,4 @@ function runSection({ blocks }: Section, changes: Change[]): void {
 function checkProblems({ text, annotations }: Annotated, analysis: Analysis): void {
   const found = analysis.problems().map((problem) => annotationOf(problem, text));
   assert.equal(annotate(text, asStated(found, annotations)), annotate(text, annotations));
-}
-
-/** What a block that follows a document shows of it. The block holds `expected`; `text` is what it should hold. */
-type Show = (block: Block, subject: Subject) => { readonly expected: string; readonly text: string };
-
-const shows: ReadonlyMap<string, Show> = new Map<string, Show>([['fix', showFix]]);
-
-function showFix({ argument, lines }: Block, { document, analysis }: Subject): ReturnType<Show> {
-  const [, code, title] = /^(\S+) "(.+)"$/.exec(argument) ?? [];
-  assert.ok(code && title, `write a fix as: fix CODE "TITLE", not ${argument}`);
-  const after = applyFix(document.text, fixNamed(analysis, code, title));
-  const expected = lines.join('\n');
-  return { expected, text: expected === after ? after : changedLines(document.text, after) };
 }

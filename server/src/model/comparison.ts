@@ -175,7 +175,13 @@ const RANK = { fails: 0, undecided: 1, holds: 2 } as const;
 
 function not(a: Verdict): Verdict {
   const status = a.status === 'undecided' ? 'undecided' : a.status === 'holds' ? 'fails' : 'holds';
-  return { ...a, status, holds: !a.holds, negated: !a.negated, ...(a.margin === undefined ? {} : { margin: -a.margin }) };
+  return {
+    ...a,
+    status,
+    holds: !a.holds,
+    negated: !a.negated,
+    ...(a.margin === undefined ? {} : { margin: -a.margin }),
+  };
 }
 
 function side(text: string, value: Quantity): Side {
