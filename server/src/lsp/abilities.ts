@@ -16,7 +16,7 @@ export interface Abilities {
   readonly markdownCompletion: boolean;
   readonly markdownSignature: boolean;
   readonly snippets: boolean;
-  readonly insertReplace: boolean;
+  readonly preparesRename: boolean;
   readonly nestedSymbols: boolean;
   readonly labelOffsets: boolean;
   readonly configuration: boolean;
@@ -49,7 +49,7 @@ export function abilitiesOf({
     markdownSignature:
       textDocument?.signatureHelp?.signatureInformation?.documentationFormat?.includes(MarkupKind.Markdown) === true,
     snippets: completion?.completionItem?.snippetSupport === true,
-    insertReplace: completion?.completionItem?.insertReplaceSupport === true,
+    preparesRename: textDocument?.rename?.prepareSupport === true,
     nestedSymbols: textDocument?.documentSymbol?.hierarchicalDocumentSymbolSupport === true,
     labelOffsets: textDocument?.signatureHelp?.signatureInformation?.parameterInformation?.labelOffsetSupport === true,
     configuration: workspace?.configuration === true,

@@ -1,14 +1,28 @@
 import type { ServerCapabilities } from 'vscode-languageserver';
-import { TextDocumentSyncKind } from 'vscode-languageserver';
+import { CodeActionKind, TextDocumentSyncKind } from 'vscode-languageserver';
 import type { Abilities } from './abilities';
+import { fixAllKind } from './convert/codeAction';
 
 /** What the server can do, as it tells the client. */
-export function capabilitiesFor({ pullsDiagnostics }: Abilities): ServerCapabilities {
+export function capabilitiesFor({ pullsDiagnostics, preparesRename }: Abilities): ServerCapabilities {
   return {
     textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
     workspace: { workspaceFolders: { supported: true, changeNotifications: true } },
     ...(pullsDiagnostics ? { diagnosticProvider: { interFileDependencies: true, workspaceDiagnostics: false } } : {}),
     hoverProvider: true,
     inlayHintProvider: true,
+    signatureHelpProvider: { triggerCharacters: ['(', ','] },
+    completionProvider: { triggerCharacters: ['.', ' ', '=', '"'] },
+    codeActionProvider: { codeActionKinds: [CodeActionKind.QuickFix, CodeActionKind.Refactor, fixAllKind] },
+    documentFormattingProvider: true,
+    documentRangeFormattingProvider: true,
+    documentOnTypeFormattingProvider: { firstTriggerCharacter: '}', moreTriggerCharacter: ['\n'] },
+    definitionProvider: true,
+    referencesProvider: true,
+    documentHighlightProvider: true,
+    renameProvider: preparesRename ? { prepareProvider: true } : true,
+    foldingRangeProvider: true,
+    selectionRangeProvider: true,
+    documentLinkProvider: {},
   };
 }

@@ -13,6 +13,8 @@ export interface Documents {
   reload(uri: string): void;
   opened(): Iterable<TextDocument>;
   isOpen(uri: string): boolean;
+  /** The canonical address, by which analyses know a file. */
+  key(uri: string): string;
   /** The text of a file that is open or has been read. */
   get(uri: string): TextDocument | undefined;
   /** The files that are open or have been read. */
@@ -113,6 +115,7 @@ export function createDocuments({ read, onArrival }: DocumentsOptions): Document
       if (onDisk.has(key)) fetch(key);
     },
     opened: () => opened.values(),
+    key: canonical,
     isOpen: (uri) => opened.has(canonical(uri)),
     get,
     known: () =>

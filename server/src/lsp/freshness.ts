@@ -1,7 +1,7 @@
 import type { Analysis } from '../model/analysis';
 import { diagnostics } from '../features/diagnostics';
 import { canonical } from './address';
-import { toDiagnostic } from './convert';
+import { toDiagnostic } from './convert/diagnostic';
 import { createSchedule } from './schedule';
 import type { Session } from './session';
 

@@ -8,7 +8,11 @@ import { createDocuments } from './documents';
 import type { Freshness } from './freshness';
 import { createFreshness } from './freshness';
 import { createGuard } from './guard';
-import { registerLanguageFeatures } from './languageFeatures';
+import { handleNames } from './handlers/names';
+import { handleProblems } from './handlers/problems';
+import { handleStructure } from './handlers/structure';
+import { handleValues } from './handlers/values';
+import { handleWriting } from './handlers/writing';
 import { readFileRequest } from './messages';
 import type { ReadFileParams } from './messages';
 import type { Runtime } from './runtime';
@@ -124,6 +128,10 @@ export function startServer(connection: Connection, runtime: Runtime): void {
     }),
   );
 
-  registerLanguageFeatures(session, freshness);
+  handleProblems(session, freshness);
+  handleValues(session, freshness);
+  handleWriting(session);
+  handleNames(session);
+  handleStructure(session);
   connection.listen();
 }
