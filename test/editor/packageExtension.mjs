@@ -2,5 +2,6 @@
 import { createVSIX } from '@vscode/vsce';
 
 export async function packageExtension(folder, packagePath) {
-  await createVSIX({ cwd: folder, packagePath, dependencies: false });
+  // The pictures of the README lie beside it; there is no public address to point them to.
+  await createVSIX({ cwd: folder, packagePath, dependencies: false, rewriteRelativeLinks: false });
 }

@@ -109,7 +109,7 @@ function steps({ page, folder, scratch, url, strangers }, { vsix, picture }) {
     [
       'explains the state where the pointer rests on its name',
       async () => {
-        await workbench.hoverOver(page, NAME, { showing: /mean free path/i });
+        await workbench.hoverOver(page, NAME, { showing: /mean[ _]free[ _]path/i });
         await picture('3-hover');
       },
     ],

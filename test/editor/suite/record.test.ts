@@ -33,7 +33,7 @@ describe('a record in the editor', () => {
 
   it('explains a state where the pointer rests on its name', async () => {
     const document = await openRecord('lock.gas');
-    match(await hoverAt(document, placeOf(document, 'residual')), /mean free path/i, 'hover');
+    match(await hoverAt(document, placeOf(document, 'residual')), /mean[ _]free[ _]path/i, 'hover');
   });
 
   it('flags a length where a pressure is wanted, and puts the unit that was meant', async () => {
