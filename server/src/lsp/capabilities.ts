@@ -2,6 +2,7 @@ import type { ServerCapabilities } from 'vscode-languageserver';
 import { CodeActionKind, TextDocumentSyncKind } from 'vscode-languageserver';
 import type { Abilities } from './abilities';
 import { fixAllKind } from './convert/codeAction';
+import { tokensLegend } from './convert/tokens';
 
 /** What the server can do, as it tells the client. */
 export function capabilitiesFor({ pullsDiagnostics, preparesRename }: Abilities): ServerCapabilities {
@@ -21,6 +22,9 @@ export function capabilitiesFor({ pullsDiagnostics, preparesRename }: Abilities)
     referencesProvider: true,
     documentHighlightProvider: true,
     renameProvider: preparesRename ? { prepareProvider: true } : true,
+    documentSymbolProvider: true,
+    workspaceSymbolProvider: true,
+    semanticTokensProvider: { legend: tokensLegend, full: { delta: true }, range: true },
     foldingRangeProvider: true,
     selectionRangeProvider: true,
     documentLinkProvider: {},

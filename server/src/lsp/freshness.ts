@@ -1,5 +1,6 @@
 import type { Analysis } from '../model/analysis';
 import { diagnostics } from '../features/diagnostics';
+import { semanticTokens } from '../features/semanticTokens';
 import { canonical } from './address';
 import { toDiagnostic } from './convert/diagnostic';
 import { createSchedule } from './schedule';
@@ -16,11 +17,15 @@ export interface Freshness {
   answered(kind: Shown, analysis: Analysis): void;
 }
 
-type Shown = 'hints' | 'diagnostics';
+type Shown = 'hints' | 'diagnostics' | 'tokens';
 
 export function createFreshness(session: Session): Freshness {
   const { connection, documents } = session;
-  const shown: Record<Shown, Map<string, Analysis>> = { hints: new Map(), diagnostics: new Map() };
+  const shown: Record<Shown, Map<string, Analysis>> = {
+    hints: new Map(),
+    diagnostics: new Map(),
+    tokens: new Map(),
+  };
   const stale = new Set<Shown>();
 
   /** What has changed in the file itself the client asks for by itself; here it is about the files that it uses. */
@@ -48,6 +53,7 @@ export function createFreshness(session: Session): Freshness {
     if (stale.has('diagnostics') && session.abilities.refreshesDiagnostics) {
       ask(connection.languages.diagnostics.refresh());
     }
+    if (stale.has('tokens') && session.abilities.refreshesTokens) ask(connection.languages.semanticTokens.refresh());
     stale.clear();
   };
 
@@ -60,6 +66,7 @@ export function createFreshness(session: Session): Freshness {
       yield undefined;
       compare('hints', analysis, valuesDiffer);
       compare('diagnostics', analysis, problemsDiffer);
+      compare('tokens', analysis, tokensDiffer);
       if (!session.abilities.pullsDiagnostics) publish(analysis);
     },
     onIdle: refresh,
@@ -95,4 +102,8 @@ function valuesDiffer(before: Analysis, now: Analysis): boolean {
 
 function problemsDiffer(before: Analysis, now: Analysis): boolean {
   return JSON.stringify(diagnostics(before)) !== JSON.stringify(diagnostics(now));
+}
+
+function tokensDiffer(before: Analysis, now: Analysis): boolean {
+  return JSON.stringify(semanticTokens(before)) !== JSON.stringify(semanticTokens(now));
 }

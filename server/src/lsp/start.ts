@@ -8,6 +8,7 @@ import { createDocuments } from './documents';
 import type { Freshness } from './freshness';
 import { createFreshness } from './freshness';
 import { createGuard } from './guard';
+import { handleColours } from './handlers/colours';
 import { handleNames } from './handlers/names';
 import { handleProblems } from './handlers/problems';
 import { handleStructure } from './handlers/structure';
@@ -133,5 +134,6 @@ export function startServer(connection: Connection, runtime: Runtime): void {
   handleWriting(session);
   handleNames(session);
   handleStructure(session);
+  handleColours(session, freshness);
   connection.listen();
 }

@@ -1,11 +1,12 @@
-import type { Location } from 'vscode-languageserver';
+import type { Location, ReferenceParams, RenameParams, WorkspaceSymbolParams } from 'vscode-languageserver';
 import { DocumentHighlightKind, LSPErrorCodes, ResponseError } from 'vscode-languageserver';
-import type { ReferenceParams, RenameParams } from 'vscode-languageserver';
 import { definition, highlights, references } from '../../features/navigation';
 import { prepareRename, rename } from '../../features/rename';
+import { workspaceSymbols } from '../../features/workspaceSymbols';
 import { toWorkspaceEdit } from '../convert/edit';
 import { toLocation } from '../convert/location';
 import { toOffset, toRange } from '../convert/range';
+import { toWorkspaceSymbol } from '../convert/symbol';
 import { loadWorkspace } from '../loadWorkspace';
 import type { Session } from '../session';
 import { onFile } from './onFile';
@@ -39,6 +40,13 @@ export function handleNames(session: Session): void {
       const declaration = context.includeDeclaration ? 'included' : 'left out';
       const found = references(sight, documents.key(document.uri), toOffset(document, position), { declaration });
       return found.flatMap((each) => toLocation(each, documents) ?? []);
+    }),
+  );
+
+  connection.onWorkspaceSymbol(
+    guard.request('workspaceSymbol', [], async ({ query }: WorkspaceSymbolParams) => {
+      const { analyses } = await loadWorkspace(session);
+      return workspaceSymbols(analyses, query).flatMap((each) => toWorkspaceSymbol(each, documents));
     }),
   );
 
