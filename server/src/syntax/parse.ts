@@ -1,5 +1,6 @@
+import { children } from './children';
 import { parse as parseDeclaration } from './generated/parser';
-import type { Declaration, File, Item } from './nodes';
+import type { Declaration, File, Item, Node } from './nodes';
 import { split } from './split';
 
 /** Parses a whole file: a tree for every text. */
@@ -26,14 +27,28 @@ export function createParser(): (text: string) => File {
   };
 }
 
-/** The grammar takes every text; what it cannot take is nesting deeper than the stack. */
+/** The grammar takes every text; what neither it nor a reader of its tree can take is nesting deeper than the stack. */
 function parseOne(text: string): Declaration {
   try {
-    return parseDeclaration(text);
+    const declaration = parseDeclaration(text);
+    return text.length > DEEPEST && isDeeper(declaration) ? tooDeep(text) : declaration;
   } catch (error) {
     if (error instanceof RangeError) return tooDeep(text);
     throw error;
   }
+}
+
+/** In levels: far more than anyone writes, far less than the stack of a worker holds. A level takes a character at least. */
+const DEEPEST = 500;
+
+/** Level by level, as the depth is what is in question. */
+function isDeeper(root: Node): boolean {
+  let level: readonly Node[] = [root];
+  for (let depth = 0; level.length > 0; depth += 1) {
+    if (depth > DEEPEST) return true;
+    level = level.flatMap(children);
+  }
+  return false;
 }
 
 function tooDeep(text: string): Declaration {
