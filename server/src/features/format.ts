@@ -1,6 +1,6 @@
 import { syntaxProblems } from '../model/syntaxProblems';
 import { walk } from '../syntax/children';
-import type { Declaration, Item, NumberLiteral } from '../syntax/nodes';
+import type { Declaration, File, Item, NumberLiteral } from '../syntax/nodes';
 import { parse } from '../syntax/parse';
 import { layOut } from './formatLayout';
 import { canonicalUnit } from './formatSpacing';
@@ -11,17 +11,18 @@ import { tokensOf } from './tokens';
 export interface FormatOptions {
   /** Only the lines that this touches. */
   readonly range?: { readonly start: number; readonly end: number };
+  /** The tree of the text, where it is at hand. */
+  readonly file?: File;
 }
 
 /**
  * The smallest changes that bring a text into its usual form. They change white space, the spelling of units and `+-`,
  * and nothing else; a declaration with an error in its syntax is left as it is.
  */
-export function format(text: string, options: FormatOptions = {}): readonly TextEdit[] {
+export function format(text: string, { range, file = parse(text) }: FormatOptions = {}): readonly TextEdit[] {
   // A carriage return alone ends a line for editors but not for the format.
   if (/\r(?!\n)/.test(text)) return [];
-  const file = parse(text);
-  const wanted = wholeLines(text, options.range);
+  const wanted = wholeLines(text, range);
   const kept = new Set(file.items.filter(({ declaration, text: own }) => !isWhole(declaration, own)));
   for (;;) {
     const edits = layOut(file, kept).filter(({ start, end }) => start >= wanted.start && end <= wanted.end);

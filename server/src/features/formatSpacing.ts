@@ -70,7 +70,7 @@ export function alignedEquals(
 }
 
 function opensItsLine({ span }: Entry, text: string): boolean {
-  return text.slice(text.lastIndexOf('\n', span.start - 1), span.start).trim() === '';
+  return text.slice(text.lastIndexOf('\n', span.start - 1) + 1, span.start).trim() === '';
 }
 
 function allEqual(numbers: readonly number[]): boolean {

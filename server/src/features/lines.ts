@@ -6,9 +6,9 @@ export interface Position {
 /** Where the lines of a text are. Lines and characters count from zero, characters in UTF-16 units. */
 export interface LineIndex {
   readonly lineCount: number;
-  positionAt(offset: number): Position;
+  readonly positionAt: (offset: number) => Position;
   /** The nearest offset there is; a line's end where the character lies beyond it. */
-  offsetAt(position: Position): number;
+  readonly offsetAt: (position: Position) => number;
 }
 
 /** A line ends with `\n`, `\r\n` or `\r`. */
