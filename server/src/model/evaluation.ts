@@ -45,6 +45,7 @@ export function createEvaluation(sight: Sight): Evaluation {
   const running = new Set<Declared>();
   const circles = new Map<Declared, readonly Place[]>();
   const prepared = new Set<Document>();
+  const names = new Map<Document, string>();
   const ran: string[] = [];
 
   const find = (document: Document, name: string): Place | undefined => {
@@ -124,7 +125,16 @@ export function createEvaluation(sight: Sight): Evaluation {
       }
       case 'display':
         return document.display;
+      case 'names':
+        return namesIn(document);
     }
+  };
+
+  /** The names that can be seen, as one text, so that equal lists are equal. */
+  const namesIn = (document: Document): string => {
+    const known = names.get(document) ?? [...visibleNames(document, sight)].join(' ');
+    names.set(document, known);
+    return known;
   };
 
   const scopeOf = (
@@ -132,11 +142,10 @@ export function createEvaluation(sight: Sight): Evaluation {
     read: (key: ReadKey) => unknown,
     report: (problem: Problem) => void,
   ): DeclarationScope => {
-    const { document } = place;
     return {
       report,
       lookUp: (name) => lookup(read(`name:${name}`)),
-      names: () => visibleNames(document, sight),
+      names: () => (read('names:') as string).split(' '),
       condition: (name) => conditionValue(name, read(`assume:${name}`)),
       regimeLimits: () => {
         const outcome = read(`assume:${REGIME_LIMITS}`) as Outcome | undefined;
@@ -157,11 +166,12 @@ export function createEvaluation(sight: Sight): Evaluation {
   };
 }
 
-type ReadKey = `${'name' | 'assume' | 'file' | 'display'}:${string}`;
+type ReadSort = 'name' | 'names' | 'assume' | 'file' | 'display';
+type ReadKey = `${ReadSort}:${string}`;
 
-function splitKey(key: string): ['name' | 'assume' | 'file' | 'display', string] {
+function splitKey(key: string): [ReadSort, string] {
   const colon = key.indexOf(':');
-  return [key.slice(0, colon) as 'name' | 'assume' | 'file' | 'display', key.slice(colon + 1)];
+  return [key.slice(0, colon) as ReadSort, key.slice(colon + 1)];
 }
 
 function lookup(seen: unknown): Lookup {
