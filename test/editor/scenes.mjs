@@ -4,20 +4,35 @@
 //   caret     { at }           the caret is put on a word
 //   fixes     { at }           the menu of quick fixes is open at a word
 //   problems                   the Problems view is open and lists something
-//   type      { text }         a text is typed at the caret
+//   replace   { at, text }     a word is typed over
 //   press     { key }          a key, as in 'Control+Space'
 //   command   { title }        a command, by the palette
 //   wait      { for }          a selector that must be on the screen
 // A word is named by `{ line, word }`: a piece of the line's text, and the word in it.
 
-const HINT = 'span[class*="dyn-rule-"]';
+const HINT = 'span[class*="dyn-rule-"]:not(:empty)';
 
 export const scenes = [
   {
     name: 'record',
     file: 'load-lock.gas',
     theme: 'light',
-    size: { width: 960, height: 720 },
-    show: [{ kind: 'wait', for: HINT }],
+    size: { width: 960, height: 640 },
+    show: [
+      { kind: 'wait', for: HINT },
+      { kind: 'hover', at: { line: 'state residual', word: 'residual' }, showing: 'mean_free_path' },
+    ],
+  },
+  {
+    name: 'fix',
+    file: 'load-lock.gas',
+    theme: 'light',
+    size: { width: 960, height: 480 },
+    show: [
+      { kind: 'wait', for: HINT },
+      { kind: 'replace', at: { line: '3e-3 mbar', word: 'mbar' }, text: 'mm' },
+      { kind: 'wait', for: '.squiggly-error' },
+      { kind: 'fixes', at: { line: '3e-3 mm', word: 'mm' } },
+    ],
   },
 ];

@@ -80,8 +80,8 @@ function bringAbout(page, thing) {
       return workbench.openQuickFixes(page, thing.at);
     case 'problems':
       return workbench.openProblems(page).then((rows) => rows.first().waitFor());
-    case 'type':
-      return page.keyboard.type(thing.text);
+    case 'replace':
+      return workbench.replaceWord(page, thing.at, thing.text);
     case 'press':
       return page.keyboard.press(thing.key);
     case 'command':

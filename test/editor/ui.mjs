@@ -122,6 +122,17 @@ function steps({ page, folder, scratch, url, strangers }, { vsix, picture }) {
         await picture('4-saved');
       },
     ],
+    [
+      'goes on after a restart of the language server, in a new file from a starter',
+      async () => {
+        await workbench.runCommand(page, 'Gas State: Restart the language server');
+        await workbench.runCommand(page, 'Gas State: New gas-state file');
+        await workbench.choose(page, 'Blank state');
+        await workbench.replaceWord(page, { line: 'pressure', word: 'Pa' }, 'mm');
+        await workbench.squiggle(page, 'error').waitFor();
+        await picture('5-new-file');
+      },
+    ],
     ['asks no other machine for anything', () => assert.deepEqual(strangers, [])],
   ];
 }

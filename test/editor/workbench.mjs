@@ -19,12 +19,18 @@ export async function openFile(page, name) {
   await editor(page).locator('.view-line').first().waitFor();
 }
 
+/** By the command palette. */
 export async function runCommand(page, title) {
   await page.keyboard.press('F1');
   await page.locator('.quick-input-widget input').fill(`>${title}`);
-  await page.locator('.quick-input-list .monaco-list-row', { hasText: title }).first().waitFor();
-  await page.keyboard.press('Enter');
-  await page.locator('.quick-input-widget').waitFor({ state: 'hidden' });
+  await choose(page, title);
+}
+
+/** Picks an entry of the list that is open at the top. */
+export async function choose(page, entry) {
+  const row = page.locator('.quick-input-list .monaco-list-row', { hasText: entry }).first();
+  await row.click();
+  await row.waitFor({ state: 'hidden' });
 }
 
 export function editor(page) {
@@ -61,6 +67,14 @@ export async function hoverOver(page, place, { showing }) {
 export async function clickOn(page, place) {
   const { x, y } = await wordCentre(page, place);
   await page.mouse.click(x, y);
+}
+
+/** Types over a word. */
+export async function replaceWord(page, place, text) {
+  const { x, y } = await wordCentre(page, place);
+  await page.mouse.dblclick(x, y);
+  await page.keyboard.type(text);
+  await page.keyboard.press('Escape'); // Closes the suggestions.
 }
 
 /** Opens the menu of quick fixes at a word; returns the entries. */
