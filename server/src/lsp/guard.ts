@@ -7,7 +7,7 @@ export interface Guard {
   request<P, R>(
     name: string,
     fallback: R,
-    answer: (params: P, token: CancellationToken) => R | Promise<R>,
+    answer: (params: P) => R | Promise<R>,
   ): (params: P, token: CancellationToken) => Promise<R | ResponseError<never>>;
   /** A fault is logged and the notification passed over. */
   notification<P>(name: string, take: (params: P) => void): (params: P) => void;
@@ -30,10 +30,13 @@ export function createGuard({ log, faults = 'log' }: GuardOptions): Guard {
   return {
     report,
     request: (name, fallback, answer) => async (params, token) => {
-      if (unwanted(token)) return cancelled(name);
+      const cancelled = new ResponseError<never>(LSPErrorCodes.RequestCancelled, `${name} was cancelled`);
+      if (token.isCancellationRequested) return cancelled;
+      const calledOff = new Promise<typeof cancelled>((resolve) => {
+        token.onCancellationRequested(() => resolve(cancelled));
+      });
       try {
-        const result = await answer(params, token);
-        return unwanted(token) ? cancelled(name) : result;
+        return await Promise.race([answer(params), calledOff]);
       } catch (error) {
         report(name, error);
         return fallback;
@@ -47,14 +50,6 @@ export function createGuard({ log, faults = 'log' }: GuardOptions): Guard {
       }
     },
   };
-}
-
-function unwanted(token: CancellationToken): boolean {
-  return token.isCancellationRequested;
-}
-
-function cancelled(name: string): ResponseError<never> {
-  return new ResponseError(LSPErrorCodes.RequestCancelled, `${name} was cancelled`);
 }
 
 function describe(error: unknown): string {
