@@ -176,6 +176,14 @@ describe('extracting a value', () => {
     );
   });
 
+  it('ends its line as the file does', () => {
+    check(
+      'tube t {\r\n  bore = 4<*> mm\r\n}',
+      'Extract to let bore',
+      'let bore = 4 mm\r\ntube t {\r\n  bore = bore\r\n}',
+    );
+  });
+
   it('stands before its declaration where two share a line', () => {
     check(
       'tube a { bore = 1 mm } tube t { bore = 4<*> mm }',

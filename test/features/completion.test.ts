@@ -75,6 +75,7 @@ describe('completion in a block', () => {
     check('sweep s { <*> }', ['vary', 'show']);
     check(`${bench}sweep s { vary <*> }`, ['room', 'size', 'residual', 'foreline', 'dust', 'lock']);
     check(`${bench}sweep s { vary foreline.<*> }`, ['bore', 'length']);
+    check(`${bench}sweep s { vary foreline.bore = 1 mm .. 9 mm in 25 <*> }`, ['log steps', 'steps']);
   });
 
   it('offers no keys of a kind there is not', () => {
@@ -227,6 +228,7 @@ describe('completion of statements', () => {
     checkFirst(`${bench}state s of <*>`, ['purge', 'H2', 'D2', 'He']);
     check('state s of <*>', { has: ['N2', 'nitrogen', 'air', 'carbon_dioxide'], not: ['residual'] });
     assert.equal(item('state s of <*>', 'N2').detail, 'nitrogen');
+    assert.match(item('state s of <*>', 'CO').documentation ?? '', /flammable gas.*safety data sheet/);
     check(`${bench}state s from <*>`, ['residual']);
     check(`${bench}flow f through <*>`, ['foreline', 'roughing']);
     check(`${bench}line l = foreline -> <*>`, ['foreline', 'roughing']);

@@ -4,18 +4,19 @@ import type { Expression, Junk, Node, ThingDeclaration } from '../syntax/nodes';
 import type { Suggestion } from './completionItem';
 import { suggestion } from './completionItem';
 import type { CompletionPlace } from './completionPlace';
+import { isFirstWord } from './completionPlace';
 import { isExpression } from './refactorings/isExpression';
 
 /** The words that can go on after something complete: `because` after a condition, `of` after the name of a state. */
 export function followingSuggestions(junk: Junk, place: CompletionPlace): readonly Suggestion[] {
   // Behind other text that fits nowhere, nothing can be told.
-  if (!/^\s*[\p{L}\p{N}_]*$/u.test(junk.text)) return [];
+  if (!isFirstWord(junk, place)) return [];
   const parent = place.path.at(-2);
   if (parent?.kind === 'entry') return isExpression(parent.value) ? afterValue(parent.value) : [];
-  return parent ? afterDeclaration(parent, place) : [];
+  return parent ? afterPart(parent, place) : [];
 }
 
-function afterDeclaration(node: Node, place: CompletionPlace): readonly Suggestion[] {
+function afterPart(node: Node, place: CompletionPlace): readonly Suggestion[] {
   switch (node.kind) {
     case 'require':
       return node.because ? [] : afterCondition(node.condition, place);
@@ -24,6 +25,10 @@ function afterDeclaration(node: Node, place: CompletionPlace): readonly Suggesti
       return afterValue(node.value);
     case 'display':
       return node.items.at(-1)?.unit.kind === 'hole' ? [suggestion('keyword', 'in', 'a unit')] : [];
+    case 'vary':
+      return node.count.kind === 'hole'
+        ? []
+        : ['log steps', 'steps'].map((word) => suggestion('keyword', word, 'how many values'));
     case 'thing':
       return node.head || node.block ? [] : headWords(node);
     default:

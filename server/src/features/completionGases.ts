@@ -17,7 +17,7 @@ const described: readonly Suggestion[] = gasNames.flatMap((name) => {
   const caution =
     hazards.length === 0
       ? undefined
-      : `${hazards.map(({ value }) => value).join(', ')} — see the safety data sheet and the local codes`;
+      : `${hazards.map(({ value }) => value).join(', ')} — follow the safety data sheet, the local codes and licensed practice`;
   const detail = name === formula ? names.join(', ') : formula;
   return [suggestion('gas', name, detail, caution === undefined ? {} : { documentation: caution })];
 });

@@ -2,7 +2,7 @@ import type { Analysis } from '../model/analysis';
 import type { Declared } from '../model/declare';
 import type { DeclarationScope } from '../model/scope';
 import { children } from '../syntax/children';
-import type { Declaration, Item, Node, Span } from '../syntax/nodes';
+import type { Declaration, Item, Junk, Node, Span } from '../syntax/nodes';
 import { parse } from '../syntax/parse';
 
 /**
@@ -51,6 +51,11 @@ export function completionPlace(analysis: Analysis, offset: number): CompletionP
     typed: text.slice(replace.start, offset),
     following: text.slice(replace.end, lineEnd(text, replace.end)).trim(),
   };
+}
+
+/** Whether the word being typed stands first in a text that fits nowhere. */
+export function isFirstWord({ text }: Junk, { typed }: CompletionPlace): boolean {
+  return text.trimStart().startsWith(typed + MARK);
 }
 
 /** Inside comments and texts, and within the digits of a number, there is nothing to choose from. */

@@ -17,7 +17,7 @@ import type { CompletionPlace } from './completionPlace';
 import type { Wanted } from './completionWanted';
 import { isWanted, measured, wantedAt, wantsPlainNumber } from './completionWanted';
 import { kindMeant } from './describeUnits';
-import { readingOfSi, siOfReading } from './refactorings/literalReading';
+import { readingOfSi, siOfReading, withUnit } from './refactorings/literalReading';
 
 /** The units that fit after a number, after `in` and in `display`: the usual ones first. */
 export function unitSuggestions(place: CompletionPlace): readonly Suggestion[] {
@@ -96,8 +96,7 @@ function converted(
   const sign = around?.kind === 'unary' && around.operator === '-' ? -1 : 1;
   const role = wanted?.difference ? 'difference' : 'value';
   const si = siOfReading(sign * number.value, unit, role, scope);
-  const reading = formatNumber(readingOfSi(si, other, role, scope), 4);
-  return `${reading} ${other.text}`.replace(/ (?:1|(?=°$))$/, '');
+  return withUnit(formatNumber(readingOfSi(si, other, role, scope), 4), other);
 }
 
 /** The file's own unit, the coherent one, or the most usual other one. */

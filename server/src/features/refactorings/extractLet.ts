@@ -19,13 +19,14 @@ export function extractLet(analysis: Analysis, range: Span): readonly Refactorin
   const { text } = analysis;
   const name = freeName(nameFor(node, path), analysis, selection.declared.name?.text);
   const at = declarationStart(text, item);
+  const lineEnd = text.includes('\r\n') ? '\r\n' : '\n';
   const indent = at === item.offset ? '' : (/^[ \t]*/.exec(text.slice(at))?.[0] ?? '');
   const [start, end] = [item.offset + node.span.start, item.offset + node.span.end];
   return [
     {
       title: `Extract to let ${name}`,
       edits: [
-        { start: at, end: at, text: `${indent}let ${name} = ${onItsOwn(node, text.slice(start, end))}\n` },
+        { start: at, end: at, text: `${indent}let ${name} = ${onItsOwn(node, text.slice(start, end))}${lineEnd}` },
         { start, end, text: name },
       ],
     },

@@ -27,9 +27,14 @@ export function writeReading(reading: number): string {
   return plain.includes('e') || short.length < plain.length ? short : plain;
 }
 
-/** The degree of angle stands tight, every other unit after a space. */
 export function writeQuantity(reading: number, unit: Unit): string {
-  return `${writeReading(reading)}${unit.text === '°' ? '' : ' '}${unit.text}`;
+  return withUnit(writeReading(reading), unit);
+}
+
+/** The degree of angle stands tight, every other unit after a space; a plain number has none. */
+export function withUnit(number: string, { text }: Unit): string {
+  if (text === '1') return number;
+  return text === '°' ? `${number}°` : `${number} ${text}`;
 }
 
 /** The fewest digits within a billionth, so that a conversion and its way back end where they began. */
