@@ -43,11 +43,17 @@ export function toCompletionItem(
   };
 }
 
+const STOP =
+  /\\(?<escaped>[$}\\])|\$\{\d+:(?<text>(?:\\.|[^}\\])*)\}|\$\{\d+\|(?<choice>[^,|]*)[^}]*\}|\$\{\d+\}|\$\d+/g;
+
 /** `${1:10 Pa}` → `10 Pa`, `$0` → nothing, for editors without tab stops. */
 function withoutStops(snippet: string): string {
-  return snippet
-    .replace(/\$\{\d+:((?:\\.|[^}\\])*)\}|\$\{\d+\|([^,|]*)[^}]*\|\}|\$\d+|\$\{\d+\}/g, (_stop, text, first) =>
-      String(text ?? first ?? ''),
-    )
-    .replace(/\\([$}\\])/g, '$1');
+  let plain = '';
+  let at = 0;
+  for (const { index, 0: stop, groups } of snippet.matchAll(STOP)) {
+    const { escaped, text, choice } = groups ?? {};
+    plain += snippet.slice(at, index) + (escaped ?? text?.replace(/\\(.)/g, '$1') ?? choice ?? '');
+    at = index + stop.length;
+  }
+  return plain + snippet.slice(at);
 }
