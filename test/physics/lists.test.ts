@@ -9,7 +9,7 @@ describe('lists', () => {
   it('hold every output of a state, once', () => {
     const names = stateProperties.map(({ name }) => name);
     assert.equal(new Set(names).size, names.length);
-    assert.equal(names.length, 35);
+    assert.equal(names.length, 38);
     for (const name of names) assert.equal(statePropertyNamed(name)?.name, name);
     for (const row of stateProperties) assert.equal(row.perSpecies, row.computeFor !== undefined, row.name);
   });

@@ -20,6 +20,12 @@ export function explainReason(reason: Reason): string {
       return `${reason.given.map(spoken).join(', ')} are more than fix the state`;
     case 'per-species':
       return `a mixture has no ${spoken(reason.property)} of its own; ask for that of a species, as in NAME.N2.${reason.property}`;
+    case 'above-critical': {
+      const { quantity, critical, species } = reason;
+      const limit =
+        quantity === 'temperature' ? `${formatNumber(critical, 4)} K` : `${formatNumber(critical / 1e5, 4)} bar`;
+      return `above its critical ${quantity} of ${limit}, ${species} does not condense`;
+    }
     case 'empty-composition':
       return 'the gas has no parts';
     case 'fraction-sum':
@@ -37,6 +43,10 @@ export function dataTitle(data: DataKind): string {
       return 'heat capacity';
     case 'pair_potential':
       return 'intermolecular potential';
+    case 'saturation_pressure':
+      return 'saturation pressure';
+    case 'critical_point':
+      return 'critical point';
   }
 }
 

@@ -46,6 +46,10 @@ const meanings: Readonly<{ [name: string]: string | Omit<ResultDefinition, 'name
   impingement_rate: 'molecules that strike a wall (Hertz–Knudsen)',
   mass_flux: 'the mass that strikes a wall',
   monolayer_time: 'how long a clean surface takes to be covered if every molecule stays',
+  saturation_pressure: 'the pressure at which the vapour would be in equilibrium with its liquid or solid',
+  condensation_margin:
+    'saturation pressure over partial pressure: above 1 the vapour is dry, below 1 it condenses or freezes',
+  dew_point: 'the temperature to which the gas may cool until this vapour condenses or freezes',
   thermal_wavelength: 'the de Broglie wavelength of thermal motion',
   mean_kinetic_energy: 'of the translation of one molecule',
   mach: { symbol: 'Ma', quantityKind: 'number', meaning: 'the speed of the stream against that of sound' },

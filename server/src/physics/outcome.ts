@@ -37,6 +37,13 @@ export type Reason =
   | { readonly kind: 'surplus'; readonly given: readonly string[] }
   /** The property belongs to one species; the mixture as a whole has none. */
   | { readonly kind: 'per-species'; readonly property: string }
+  /** Above the critical temperature or pressure of a species there is no liquid to be in equilibrium with. */
+  | {
+      readonly kind: 'above-critical';
+      readonly species: string;
+      readonly quantity: 'temperature' | 'pressure';
+      readonly critical: number;
+    }
   /** The composition names no species. */
   | { readonly kind: 'empty-composition' }
   /** The fractions do not add up to one. */
@@ -66,7 +73,8 @@ export type Note =
     };
 
 /** The sorts of data that a species may have or lack. */
-export type DataKind = 'viscosity' | 'conductivity' | 'heat_capacity' | 'pair_potential';
+export type DataKind =
+  'viscosity' | 'conductivity' | 'heat_capacity' | 'pair_potential' | 'saturation_pressure' | 'critical_point';
 
 const noNotes: readonly Note[] = [];
 

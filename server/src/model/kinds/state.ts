@@ -50,7 +50,7 @@ export const state: Kind = {
   ],
   needs: [{ count: 2, of: ['pressure', 'temperature', 'number_density', 'density'] }],
   hint: ['mean_free_path', 'number_density'],
-  later: ['compressibility_factor', 'second_virial', 'saturation_pressure', 'condensation_margin'],
+  later: ['compressibility_factor', 'second_virial'],
   snippet: 'state ${1:name} of ${2:N2} {\n  pressure    = ${3:1e-3 mbar}\n  temperature = ${4:20 °C}\n}',
   compute: (given, scope) => {
     const gas = given.gas ?? given.from?.gas;

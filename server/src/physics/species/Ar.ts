@@ -22,5 +22,44 @@ export const Ar: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 20,
+        high: 83.8058,
+        pressure: 1e5,
+        inverse: [10.69, -893.2, -3567, 6.574e4, -4.28e5],
+      },
+      source: 'Fray & Schmitt 2009',
+      where: 'table 5; from memory',
+      uncertainty: 0.05,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 83.8058,
+        high: 150.687,
+        temperature: 150.687,
+        pressure: 4863000.0,
+        terms: [
+          { n: -5.9409785, t: 1 },
+          { n: 1.3553888, t: 1.5 },
+          { n: -0.46497607, t: 2 },
+          { n: -1.5399043, t: 4.5 },
+        ],
+      },
+      source: 'Tegeler 1999',
+      where: 'ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.002,
+    },
+  ],
+  critical: {
+    value: { temperature: 150.86, pressure: 4.898e6, acentric: -0.002 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

@@ -57,6 +57,45 @@ export const CH4: Species = {
     source: 'Svehla 1962',
     where: 'table I; the place from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 30,
+        high: 90.6941,
+        pressure: 1e5,
+        inverse: [10.51, -1110, -4341, 1.035e5, -7.91e5],
+      },
+      source: 'Fray & Schmitt 2009',
+      where: 'table 5; as repeated by others',
+      uncertainty: 0.05,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 90.6941,
+        high: 190.564,
+        temperature: 190.564,
+        pressure: 4599200.0,
+        terms: [
+          { n: -6.036219, t: 1 },
+          { n: 1.409353, t: 1.5 },
+          { n: -0.4945199, t: 2 },
+          { n: -1.443048, t: 4.5 },
+        ],
+      },
+      source: 'Setzmann & Wagner 1991',
+      where: 'ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.002,
+    },
+  ],
+  critical: {
+    value: { temperature: 190.56, pressure: 4.599e6, acentric: 0.011 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220' },
     { value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' },

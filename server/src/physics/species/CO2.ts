@@ -55,5 +55,62 @@ export const CO2: Species = {
     source: 'Svehla 1962',
     where: 'table I; the place from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 40,
+        high: 154,
+        pressure: 1e5,
+        inverse: [14.76, -2571, -7.781e4, 4.325e6, -1.207e8, 1.35e9],
+      },
+      source: 'Fray & Schmitt 2009',
+      where: 'table 5; as repeated by others',
+      uncertainty: 0.05,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'solid',
+        low: 154,
+        high: 216.592,
+        temperature: 216.592,
+        pressure: 0.51795e6,
+        terms: [
+          { n: -14.740846, t: 1 },
+          { n: 2.4327015, t: 1.9 },
+          { n: -5.3061778, t: 2.9 },
+        ],
+      },
+      source: 'Span & Wagner 1996',
+      where: 'sublimation pressure; from memory',
+      uncertainty: 0.005,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 216.592,
+        high: 304.1282,
+        temperature: 304.1282,
+        pressure: 7377300.0,
+        terms: [
+          { n: -7.0602087, t: 1 },
+          { n: 1.9391218, t: 1.5 },
+          { n: -1.6463597, t: 2 },
+          { n: -3.2995634, t: 4 },
+        ],
+      },
+      source: 'Span & Wagner 1996',
+      where: 'vapour pressure; from memory',
+      uncertainty: 0.002,
+    },
+  ],
+  critical: {
+    value: { temperature: 304.12, pressure: 7.374e6, acentric: 0.225 },
+    source: 'Poling 2001',
+    where: 'appendix A',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

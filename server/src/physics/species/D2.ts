@@ -45,6 +45,33 @@ export const D2: Species = {
     source: 'Svehla 1962',
     where: 'table I, hydrogen: isotopes share their potential; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 18.724,
+        high: 38.34,
+        temperature: 38.34,
+        pressure: 1679600.0,
+        terms: [
+          { n: -5.5706, t: 1 },
+          { n: 1.7631, t: 1.5 },
+          { n: -0.5458, t: 2.83 },
+          { n: 1.2154, t: 4.06 },
+          { n: -1.1556, t: 5.4 },
+        ],
+      },
+      source: 'Richardson 2014',
+      where: 'normal deuterium, ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.01,
+    },
+  ],
+  critical: {
+    value: { temperature: 38.34, pressure: 1.665e6, acentric: -0.145 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220, by analogy with hydrogen' },
     { value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' },

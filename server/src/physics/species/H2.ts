@@ -58,6 +58,32 @@ export const H2: Species = {
     source: 'Svehla 1962',
     where: 'table I; the place from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 13.957,
+        high: 33.145,
+        temperature: 33.145,
+        pressure: 1296400.0,
+        terms: [
+          { n: -4.89789, t: 1 },
+          { n: 0.988558, t: 1.5 },
+          { n: 0.349689, t: 2 },
+          { n: 0.499356, t: 2.85 },
+        ],
+      },
+      source: 'Leachman 2009',
+      where: 'normal hydrogen, ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.005,
+    },
+  ],
+  critical: {
+    value: { temperature: 33.19, pressure: 1.313e6, acentric: -0.216 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220' },
     { value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' },

@@ -56,5 +56,48 @@ export const H2O: Species = {
     where: 'table I; the place from memory',
   },
   dipoleMoment: { value: 6.17e-30, source: 'Nelson 1967', where: '1.85 D; from memory' },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 110,
+        high: 273.16,
+        pressure: 1,
+        inverse: [9.550426, -5723.265],
+        logarithm: 3.53068,
+        direct: [-0.00728332],
+      },
+      source: 'Murphy & Koop 2005',
+      where: 'eq. 7',
+      uncertainty: 0.01,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 273.16,
+        high: 647.096,
+        temperature: 647.096,
+        pressure: 22064000.0,
+        terms: [
+          { n: -7.85951783, t: 1 },
+          { n: 1.84408259, t: 1.5 },
+          { n: -11.7866497, t: 3 },
+          { n: 22.6807411, t: 3.5 },
+          { n: -15.9618719, t: 4 },
+          { n: 1.80122502, t: 7.5 },
+        ],
+      },
+      source: 'Wagner & Pruss 2002',
+      where: 'eq. 2.5; from memory',
+      uncertainty: 0.001,
+    },
+  ],
+  critical: {
+    value: { temperature: 647.14, pressure: 22.064e6, acentric: 0.344 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [],
 };

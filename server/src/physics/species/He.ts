@@ -42,5 +42,40 @@ export const He: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'scale',
+        phase: 'liquid',
+        low: 1.25,
+        high: 2.1768,
+        centre: 5.6,
+        width: 2.9,
+        coefficients: [1.392408, 0.527153, 0.166756, 0.050988, 0.026514, 0.001975, -0.017976, 0.005409, 0.013259],
+      },
+      source: 'Preston-Thomas 1990',
+      where: 'eq. 3, table 3; from memory',
+      uncertainty: 0.003,
+    },
+    {
+      value: {
+        kind: 'scale',
+        phase: 'liquid',
+        low: 2.1768,
+        high: 5,
+        centre: 10.3,
+        width: 1.9,
+        coefficients: [3.146631, 1.357655, 0.413923, 0.091159, 0.016349, 0.001826, -0.004325, -0.004973],
+      },
+      source: 'Preston-Thomas 1990',
+      where: 'eq. 3, table 3; from memory',
+      uncertainty: 0.003,
+    },
+  ],
+  critical: {
+    value: { temperature: 5.19, pressure: 0.227e6, acentric: -0.39 },
+    source: 'Poling 2001',
+    where: 'appendix A',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

@@ -30,5 +30,45 @@ export const Kr: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 30,
+        high: 115.775,
+        pressure: 1e5,
+        inverse: [10.77, -1223, -8903, 2.635e5, -4.26e6, 2.575e7],
+      },
+      source: 'Fray & Schmitt 2009',
+      where: 'table 5; from memory',
+      uncertainty: 0.05,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 115.775,
+        high: 209.48,
+        temperature: 209.48,
+        pressure: 5525000.0,
+        terms: [
+          { n: -5.9697, t: 1 },
+          { n: 1.2673, t: 1.5 },
+          { n: -0.95609, t: 2.95 },
+          { n: -35.63, t: 9.3 },
+          { n: 56.884, t: 10.4 },
+        ],
+      },
+      source: 'Lemmon & Span 2006',
+      where: 'vapour pressure of the equation of state; from memory',
+      uncertainty: 0.005,
+    },
+  ],
+  critical: {
+    value: { temperature: 209.4, pressure: 5.5e6, acentric: 0.001 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

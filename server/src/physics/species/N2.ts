@@ -47,5 +47,57 @@ export const N2: Species = {
     source: 'Svehla 1962',
     where: 'table I; the place from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 21.2,
+        high: 35.61,
+        pressure: 1e5,
+        inverse: [12.4, -807.4, -3926, 6.297e4, -4.633e5, 1.325e6],
+      },
+      source: 'Fray & Schmitt 2009',
+      where: 'table 5; from memory',
+      uncertainty: 0.06,
+    },
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 35.61,
+        high: 63.151,
+        pressure: 1e5,
+        inverse: [8.514, -458.4, -1.987e4, 4.8e5, -4.524e6],
+      },
+      source: 'Fray & Schmitt 2009',
+      where: 'table 5; from memory',
+      uncertainty: 0.06,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 63.151,
+        high: 126.192,
+        temperature: 126.192,
+        pressure: 3395800.0,
+        terms: [
+          { n: -6.12445284, t: 1 },
+          { n: 1.2632722, t: 1.5 },
+          { n: -0.765910082, t: 2.5 },
+          { n: -1.77570564, t: 5 },
+        ],
+      },
+      source: 'Span 2000',
+      where: 'ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.002,
+    },
+  ],
+  critical: {
+    value: { temperature: 126.2, pressure: 3.398e6, acentric: 0.037 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

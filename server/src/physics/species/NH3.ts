@@ -58,6 +58,46 @@ export const NH3: Species = {
     where: 'table I; from memory',
   },
   dipoleMoment: { value: 4.9e-30, source: 'Nelson 1967', where: '1.47 D; from memory' },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'solid',
+        low: 110,
+        high: 195.49,
+        pressure: 1e5,
+        inverse: [15.96, -3537, -3.31e4, 1.742e6, -2.995e7],
+      },
+      source: 'Fray & Schmitt 2009',
+      where: 'table 5; from memory',
+      uncertainty: 0.05,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 195.49,
+        high: 405.4,
+        temperature: 405.4,
+        pressure: 11339000.0,
+        terms: [
+          { n: -7.0993, t: 1 },
+          { n: -2.433, t: 1.5 },
+          { n: 8.7591, t: 1.7 },
+          { n: -6.4091, t: 1.95 },
+          { n: -2.1185, t: 4.2 },
+        ],
+      },
+      source: 'Tillner-Roth 1993',
+      where: 'ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.005,
+    },
+  ],
+  critical: {
+    value: { temperature: 405.4, pressure: 11.353e6, acentric: 0.257 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 2, H221' },
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331' },

@@ -30,5 +30,26 @@ export const Ne: Species = {
     source: 'Svehla 1962',
     where: 'table I',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'powers',
+        phase: 'liquid',
+        low: 24.556,
+        high: 40,
+        pressure: 101325,
+        inverse: [10.6184172, -244.9607],
+        direct: [-0.08481115, 9.783496e-4],
+      },
+      source: 'IPTS 1968',
+      where: 'secondary reference points, vapour pressure of neon, T₆₈ within 10 mK; from memory',
+      uncertainty: 0.005,
+    },
+  ],
+  critical: {
+    value: { temperature: 44.4, pressure: 2.76e6, acentric: -0.016 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

@@ -49,5 +49,47 @@ export const O2: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'solid',
+        low: 43.8,
+        high: 54.361,
+        temperature: 54.361,
+        pressure: 146.33,
+        terms: [{ n: -18.14, t: 1 }],
+      },
+      source: 'Giauque & Johnston 1929',
+      where:
+        'Clausius–Clapeyron from the triple point with 8.20 kJ/mol, their heats of fusion and of vaporisation; from memory',
+      uncertainty: 0.05,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 54.361,
+        high: 154.581,
+        temperature: 154.581,
+        pressure: 5043000.0,
+        terms: [
+          { n: -6.043938, t: 1 },
+          { n: 1.175627, t: 1.5 },
+          { n: -0.994086, t: 3 },
+          { n: -3.449148, t: 7 },
+          { n: 3.343141, t: 9 },
+        ],
+      },
+      source: 'Stewart 1991',
+      where: 'ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.003,
+    },
+  ],
+  critical: {
+    value: { temperature: 154.58, pressure: 5.043e6, acentric: 0.022 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [{ value: 'oxidising gas', source: 'CLP 2008', where: 'Ox. Gas 1, H270' }],
 };

@@ -46,5 +46,47 @@ export const SF6: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'solid',
+        low: 186,
+        high: 223.555,
+        temperature: 223.555,
+        pressure: 231429,
+        terms: [{ n: -12.17, t: 1 }],
+      },
+      source: 'CRC 2014',
+      where:
+        'Clausius–Clapeyron between the triple point and the sublimation point, 209.35 K at 101.325 kPa; from memory',
+      uncertainty: 0.05,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 223.555,
+        high: 318.7232,
+        temperature: 318.7232,
+        pressure: 3755000.0,
+        terms: [
+          { n: -7.09634642, t: 1 },
+          { n: 1.676662, t: 1.5 },
+          { n: -2.3921599, t: 2.5 },
+          { n: 5.86078302, t: 4 },
+          { n: -9.02978735, t: 4.5 },
+        ],
+      },
+      source: 'Guder & Wagner 2009',
+      where: 'ancillary equation of the vapour pressure; from memory',
+      uncertainty: 0.003,
+    },
+  ],
+  critical: {
+    value: { temperature: 318.69, pressure: 3.76e6, acentric: 0.21 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

@@ -29,5 +29,47 @@ export const Xe: Species = {
     source: 'Svehla 1962',
     where: 'table I; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'solid',
+        low: 110,
+        high: 161.405,
+        temperature: 161.405,
+        pressure: 81891,
+        terms: [{ n: -11.33, t: 1 }],
+      },
+      source: 'Clusius & Riccoboni 1937',
+      where:
+        'Clausius–Clapeyron from the triple point with 15.2 kJ/mol, their heats of fusion and of vaporisation carried halfway to 110 K; from memory',
+      uncertainty: 0.1,
+    },
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 161.405,
+        high: 289.733,
+        temperature: 289.733,
+        pressure: 5842000.0,
+        terms: [
+          { n: -6.00586, t: 1 },
+          { n: 1.30532, t: 1.5 },
+          { n: -0.63587, t: 2.5 },
+          { n: -1.11246, t: 5 },
+        ],
+      },
+      source: 'Ambrose & Walton 1989',
+      where:
+        'corresponding states with the acentric factor 0.0059 that gives the normal boiling point, 165.051 K; from memory',
+      uncertainty: 0.01,
+    },
+  ],
+  critical: {
+    value: { temperature: 289.74, pressure: 5.84e6, acentric: 0.004 },
+    source: 'Poling 2001',
+    where: 'appendix A; from memory',
+  },
   hazards: [{ value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' }],
 };

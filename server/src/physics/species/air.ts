@@ -54,5 +54,26 @@ export const air: Species = {
     where: 'table I; from memory',
   },
   blend: { value: { N2: 0.7812, Ar: 0.0092, O2: 0.2096 }, source: 'Lemmon 2000', where: 'table 3; from memory' },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 59.75,
+        high: 132.6312,
+        temperature: 132.6312,
+        pressure: 3785020.0,
+        terms: [
+          { n: -0.1567266, t: 0.5 },
+          { n: -5.539635, t: 1 },
+          { n: 0.7567212, t: 2.5 },
+          { n: -3.514322, t: 4 },
+        ],
+      },
+      source: 'Lemmon 2000',
+      where: 'ancillary equation of the dew point; from memory',
+      uncertainty: 0.005,
+    },
+  ],
   hazards: [],
 };

@@ -1,5 +1,6 @@
 import type { Sourced } from '../sources';
 import type { HeatCapacity } from '../thermo/heatCapacity';
+import type { SaturationCurve } from '../thermo/saturationCurve';
 import type { Correlation } from '../transport/correlation';
 
 /** One kind of molecule, or a blend treated as one, with what is known of it. What is missing is left out, never invented. */
@@ -14,9 +15,12 @@ export interface Species {
   /** Where it is left out, the conductivity follows from viscosity and heat capacity. */
   readonly conductivity?: Sourced<Correlation>;
   readonly heatCapacity?: Sourced<HeatCapacity>;
+  /** Over the solids and the liquid, from cold to warm, each curve with its own source. */
+  readonly saturation?: readonly Sourced<SaturationCurve>[];
   readonly lennardJones?: Sourced<LennardJones>;
   /** Electric dipole moment, C m, of a polar molecule. */
   readonly dipoleMoment?: Sourced<number>;
+  readonly critical?: Sourced<CriticalPoint>;
   readonly hazards: readonly Sourced<Hazard>[];
   /** Mole fractions of what a blend consists of. */
   readonly blend?: Sourced<Readonly<Record<string, number>>>;
@@ -30,13 +34,33 @@ export interface LennardJones {
   readonly wellDepth: number;
 }
 
+/** Where liquid and vapour become one, and the acentric factor, which tells how far the vapour curve departs from argon's. */
+export interface CriticalPoint {
+  /** K. */
+  readonly temperature: number;
+  /** Pa. */
+  readonly pressure: number;
+  /** ω = −1 − lg(p_sat/p_c) at 0.7 T_c. */
+  readonly acentric: number;
+}
+
 /** Hazard classes by their GHS names; a simple asphyxiant is a class of the OSHA standard only. */
 export type Hazard =
   | 'flammable gas'
+  | 'pyrophoric gas'
+  | 'chemically unstable gas'
   | 'oxidising gas'
+  | 'flammable liquid'
+  | 'pyrophoric liquid'
+  | 'emits flammable gas with water'
   | 'acute toxicity, inhalation'
+  | 'acute toxicity, dermal'
+  | 'narcotic effects'
+  | 'carcinogenicity'
+  | 'germ cell mutagenicity'
   | 'reproductive toxicity'
   | 'specific target organ toxicity'
   | 'skin corrosion'
+  | 'serious eye irritation'
   | 'hazardous to the aquatic environment'
   | 'simple asphyxiant';

@@ -4,6 +4,7 @@ import type { Sourced } from '../sources';
 import { conductionMethod } from '../transport/conductivity';
 import type { Correlation } from '../transport/correlation';
 import { heatCapacityRange } from '../thermo/heatCapacity';
+import { dewPoint, saturationPressure } from '../thermo/saturation';
 import type { Species } from '../species/species';
 import type { StateRequest } from './request';
 
@@ -31,10 +32,11 @@ const methodErrors = {
 /** Every model error that stands behind the figures of a state. */
 export function modelErrors({ composition, point }: StateRequest): ModelError[] {
   const { species } = composition;
-  const errors = species.flatMap((one) => [
+  const errors = species.flatMap((one, i) => [
     ...correlationError('viscosity', one.formula, one.viscosity, point.temperature),
     ...correlationError('conductivity', one.formula, one.conductivity, point.temperature),
     ...heatError(one, point.temperature),
+    ...saturationError(one, point.temperature, (composition.moleFractions[i] ?? 0) * point.pressure),
   ]);
   const conducting = species.filter((one) => one.viscosity !== undefined && one.heatCapacity !== undefined);
   const methods = new Set(conducting.map(conductionMethod));
@@ -83,6 +85,16 @@ function heatError({ formula, heatCapacity }: Species, T: number): ModelError[] 
   const stated = heatCapacity.uncertainty ?? unstated;
   const inside = within(heatCapacityRange(heatCapacity.value), T);
   return [{ key: `heat_capacity:${formula}`, relative: inside ? stated : Math.max(stated, beyondRange) }];
+}
+
+/** Of the curve that the temperature lies on, or else the dew point; none where the vapour has neither. */
+function saturationError(species: Species, T: number, pressure: number): ModelError[] {
+  const { formula, saturation = [] } = species;
+  const dew = dewPoint(species, pressure);
+  const place = saturationPressure(species, T).ok ? T : dew.ok ? dew.value : undefined;
+  if (place === undefined) return [];
+  const curve = saturation.find(({ value }) => place < value.high) ?? saturation.at(-1);
+  return [{ key: `saturation_pressure:${formula}`, relative: curve?.uncertainty ?? unstated }];
 }
 
 function within({ low, high }: { readonly low: number; readonly high: number }, T: number): boolean {

@@ -1,4 +1,5 @@
 import { amountProperties } from './amounts';
+import { condensationProperties } from './condensation';
 import { kineticProperties } from './kinetic';
 import type { StateProperty } from './property';
 import { thermalProperties } from './thermal';
@@ -8,6 +9,7 @@ export const stateProperties: readonly StateProperty[] = [
   ...amountProperties,
   ...kineticProperties,
   ...thermalProperties,
+  ...condensationProperties,
 ];
 
 const byName: ReadonlyMap<string, StateProperty> = new Map(stateProperties.map((row) => [row.name, row]));

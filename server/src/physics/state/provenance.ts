@@ -1,8 +1,9 @@
 import type { Composition } from '../composition';
 import { pure } from '../composition';
 import type { DataKind } from '../outcome';
-import type { SourceId } from '../sources';
+import type { SourceId, Sourced } from '../sources';
 import type { Species } from '../species/species';
+import { saturationRange } from '../thermo/saturation';
 import { heatCapacityRange } from '../thermo/heatCapacity';
 import { stateProperties } from './properties';
 import type { Method, StateProperty } from './property';
@@ -49,8 +50,7 @@ function provenance(row: StateProperty, { species }: Composition, { method, sour
   const sources = new Set<SourceId>();
   for (const one of species) {
     for (const kind of row.restsOn) {
-      const source = dataSource(one, kind);
-      if (source !== undefined) sources.add(source);
+      for (const source of dataSources(one, kind)) sources.add(source);
     }
   }
   for (const source of published) sources.add(source);
@@ -82,16 +82,24 @@ const amongOthers: ReadonlySet<string> = new Set([
   'lewis',
 ]);
 
-function dataSource(species: Species, kind: DataKind): SourceId | undefined {
+function dataSources(species: Species, kind: DataKind): readonly SourceId[] {
+  return dataOf(species, kind).flatMap((data) => (data === undefined ? [] : [data.source]));
+}
+
+function dataOf(species: Species, kind: DataKind): readonly (Sourced<unknown> | undefined)[] {
   switch (kind) {
     case 'viscosity':
-      return species.viscosity?.source;
+      return [species.viscosity];
     case 'conductivity':
-      return species.conductivity?.source;
+      return [species.conductivity];
     case 'heat_capacity':
-      return species.heatCapacity?.source;
+      return [species.heatCapacity];
     case 'pair_potential':
-      return species.lennardJones?.source;
+      return [species.lennardJones];
+    case 'saturation_pressure':
+      return species.saturation ?? [];
+    case 'critical_point':
+      return [species.critical];
     default:
       return kind satisfies never;
   }
@@ -110,9 +118,19 @@ function commonRange(species: readonly Species[], kinds: readonly DataKind[]): T
 }
 
 function dataRange(species: Species, kind: DataKind): { readonly low: number; readonly high: number } | undefined {
-  if (kind === 'viscosity') return species.viscosity?.value;
-  if (kind === 'conductivity') return species.conductivity?.value;
-  if (kind === 'heat_capacity' && species.heatCapacity !== undefined)
-    return heatCapacityRange(species.heatCapacity.value);
-  return undefined;
+  switch (kind) {
+    case 'viscosity':
+      return species.viscosity?.value;
+    case 'conductivity':
+      return species.conductivity?.value;
+    case 'heat_capacity':
+      return species.heatCapacity && heatCapacityRange(species.heatCapacity.value);
+    case 'saturation_pressure':
+      return saturationRange(species);
+    case 'pair_potential':
+    case 'critical_point':
+      return undefined;
+    default:
+      return kind satisfies never;
+  }
 }

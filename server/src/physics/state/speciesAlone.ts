@@ -2,6 +2,7 @@ import { k, N_A, R } from '../constants';
 import type { Outcome } from '../outcome';
 import { failure, map, map2, success } from '../outcome';
 import type { Species } from '../species/species';
+import { dewPoint, saturationPressure } from '../thermo/saturation';
 import { heatCapacityRange, molarHeatCapacity } from '../thermo/heatCapacity';
 import { conductionMethod, correlatedConductivity, kineticConductivity } from '../transport/conductivity';
 import { diameterOfViscosity, viscosity } from '../transport/viscosity';
@@ -24,6 +25,10 @@ export interface SpeciesAlone {
   readonly conductivity: Outcome<number>;
   /** Hard-sphere diameter, m. */
   readonly diameter: Outcome<number>;
+  /** Saturation pressure, Pa. */
+  readonly saturation: Outcome<number>;
+  /** The temperature, K, at which it is the partial pressure. */
+  readonly dewPoint: Outcome<number>;
 }
 
 export function speciesAlone(
@@ -36,6 +41,7 @@ export function speciesAlone(
   const mass = species.molarMass.value / N_A;
   const eta = map(viscosity(species, T), (value) => value * factor(trial, `viscosity:${species.formula}`));
   const cp = heatCapacity(species, T, trial);
+  const saturationScale = factor(trial, `saturation_pressure:${species.formula}`);
   return {
     species,
     moleFraction,
@@ -46,6 +52,8 @@ export function speciesAlone(
     viscosity: eta,
     conductivity: conductivity(species, eta, cp, T, trial),
     diameter: diameter(species, eta, request),
+    saturation: map(saturationPressure(species, T), (value) => value * saturationScale),
+    dewPoint: dewPoint(species, (moleFraction * request.point.pressure) / saturationScale),
   };
 }
 
