@@ -103,6 +103,28 @@ describe('a server in trouble', () => {
     assert.equal(problem?.code, 'file-not-found');
   });
 
+  it('does without what the client refuses', async () => {
+    const refuse = () => {
+      throw new Error('not here');
+    };
+    const workspace = {
+      configuration: true,
+      didChangeWatchedFiles: { dynamicRegistration: true },
+      didChangeConfiguration: { dynamicRegistration: true },
+    };
+    const client = await serveHere(
+      {},
+      {
+        capabilities: { workspace },
+        answers: { 'client/registerCapability': refuse, 'workspace/configuration': refuse },
+      },
+    );
+    await client.next('window/logMessage', {
+      when: ({ message }: { message: string }) => message.startsWith('watched files: '),
+    });
+    await stillAnswers(client);
+  });
+
   it('does not answer what is no longer wanted', async () => {
     const client = await serveHere({});
     const file = client.open(URI, TEXT);

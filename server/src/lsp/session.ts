@@ -11,8 +11,8 @@ export interface Session {
   readonly runtime: Runtime;
   readonly guard: Guard;
   readonly documents: Documents;
-  readonly settings: Settings;
-  readonly abilities: Abilities;
+  settings: Settings;
+  abilities: Abilities;
   /** The folders of the workspace. */
-  readonly folders: readonly string[];
+  folders: readonly string[];
 }
