@@ -67,8 +67,10 @@ references('heat capacity ratio and sound', [
 ]);
 
 describe('heat capacity', () => {
+  const known = speciesList.filter((species) => species.heatCapacity !== undefined);
+
   it('joins its intervals and stands still beyond its ends', () => {
-    for (const { formula, heatCapacity } of speciesList) {
+    for (const { formula, heatCapacity } of known) {
       const { low, high } = heatCapacityRange(heatCapacity!.value);
       assert.ok(Math.abs(cp(formula, 1000 * (1 + 1e-9)) / cp(formula, 1000) - 1) < 2e-3, formula);
       assert.equal(cp(formula, low / 2), cp(formula, low));
@@ -82,7 +84,7 @@ describe('heat capacity', () => {
   });
 
   it('exceeds translation, and that of molecules exceeds rotation at room temperature', () => {
-    for (const { formula, heatCapacity } of speciesList) {
+    for (const { formula, heatCapacity } of known) {
       const least = heatCapacity!.value.kind === 'monatomic' ? 2.5 : 3.4;
       for (const T of [298.15, 500, 1000, 1500]) assert.ok(least * R <= cp(formula, T), `${formula} at ${T} K`);
     }

@@ -58,7 +58,8 @@ describe('limits and identities', () => {
   });
 
   it('the two paths of one gas keep the ratio of first-order theory, 5π/16', () => {
-    for (const { formula } of speciesList) {
+    for (const { formula, viscosity } of speciesList) {
+      if (viscosity === undefined) continue;
       const state = figures(formula, 300, 100);
       near(whole(state, 'mean_free_path') / whole(state, 'mean_free_path_hard_sphere'), (5 * Math.PI) / 16, 1e-12);
     }

@@ -71,6 +71,9 @@ references('viscosity against the check values of the correlations', [
 ]);
 
 describe('pure viscosity', () => {
+  // Beyond its range a correlation is continued by the potential, where there is one.
+  const known = speciesList.filter(({ viscosity, lennardJones }) => viscosity && lennardJones);
+
   it('of dry air follows from its three parts', () => {
     const parts = mixture({ N2: 0.7812, O2: 0.2096, Ar: 0.0092 });
     for (const T of [150, 200, 250, 300, 400, 600, 1000]) {
@@ -81,7 +84,7 @@ describe('pure viscosity', () => {
   });
 
   it('rises with temperature, without a step at the ends of the ranges', () => {
-    for (const species of speciesList) {
+    for (const species of known) {
       const { low, high } = species.viscosity!.value;
       let before = 0;
       for (let T = 1; T < 20000; T *= 1.01) {
@@ -98,7 +101,7 @@ describe('pure viscosity', () => {
   });
 
   it('says when it leaves its range, on both sides, and not within', () => {
-    for (const species of speciesList) {
+    for (const species of known) {
       const { low, high } = species.viscosity!.value;
       const kinds = (T: number) => {
         const outcome = viscosity(species, T);

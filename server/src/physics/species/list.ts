@@ -14,10 +14,97 @@ import { H2O } from './H2O';
 import { CH4 } from './CH4';
 import { NH3 } from './NH3';
 import { SF6 } from './SF6';
+import { O3 } from './O3';
+import { D2O } from './D2O';
+import { C2H2 } from './C2H2';
+import { C2H4 } from './C2H4';
+import { C2H6 } from './C2H6';
+import { C3H6 } from './C3H6';
+import { C3H8 } from './C3H8';
+import { nC4H10 } from './nC4H10';
+import { iC4H10 } from './iC4H10';
+import { C6H6 } from './C6H6';
+import { CH3OH } from './CH3OH';
+import { C2H5OH } from './C2H5OH';
+import { acetone } from './acetone';
+import { CH3Cl } from './CH3Cl';
+import { CH2Cl2 } from './CH2Cl2';
+import { CHCl3 } from './CHCl3';
+import { NO } from './NO';
+import { N2O } from './N2O';
+import { NO2 } from './NO2';
+import { SO2 } from './SO2';
+import { H2S } from './H2S';
+import { CF4 } from './CF4';
+import { CHF3 } from './CHF3';
+import { CH2F2 } from './CH2F2';
+import { CH3F } from './CH3F';
+import { COS } from './COS';
+import { HCl } from './HCl';
+import { HF } from './HF';
+import { HI } from './HI';
+import { HCN } from './HCN';
+import { F2 } from './F2';
+import { I2 } from './I2';
+import { Hg } from './Hg';
+import { BF3 } from './BF3';
+import { AsH3 } from './AsH3';
 import type { Species } from './species';
 
 /** Every gas the program knows by itself. A new one needs its file, its line here, and its reference rows. */
-export const speciesList: readonly Species[] = [H2, D2, He, Ne, Ar, Kr, Xe, N2, O2, air, CO, CO2, H2O, CH4, NH3, SF6];
+export const speciesList: readonly Species[] = [
+  H2,
+  D2,
+  He,
+  Ne,
+  Ar,
+  Kr,
+  Xe,
+  N2,
+  O2,
+  air,
+  CO,
+  CO2,
+  H2O,
+  CH4,
+  NH3,
+  SF6,
+  O3,
+  D2O,
+  C2H2,
+  C2H4,
+  C2H6,
+  C3H6,
+  C3H8,
+  nC4H10,
+  iC4H10,
+  C6H6,
+  CH3OH,
+  C2H5OH,
+  acetone,
+  CH3Cl,
+  CH2Cl2,
+  CHCl3,
+  NO,
+  N2O,
+  NO2,
+  SO2,
+  H2S,
+  CF4,
+  CHF3,
+  CH2F2,
+  CH3F,
+  COS,
+  HCl,
+  HF,
+  HI,
+  HCN,
+  F2,
+  I2,
+  Hg,
+  BF3,
+  AsH3,
+];
 
 /** A gas by its formula or by one of its common names. */
 export function speciesByName(name: string): Species | undefined {

@@ -1,3 +1,5 @@
+import { fluidity } from './stockmayer';
+
 /** How a property of the dilute gas was correlated with temperature. Every form gives SI from K between `low` and `high`. */
 export type Correlation = { readonly low: number; readonly high: number } & Form;
 
@@ -36,6 +38,21 @@ type Form =
       readonly theta: number;
       readonly numerator: readonly number[];
       readonly denominator: readonly number[];
+    }
+  /** y = C √(T/θ) Σ aᵢ (T/θ)ⁱ / Σ bᵢ (T/θ)ⁱ. */
+  | {
+      readonly kind: 'root-ratio';
+      readonly prefactor: number;
+      readonly theta: number;
+      readonly numerator: readonly number[];
+      readonly denominator: readonly number[];
+    }
+  /** y = C √T f/Ω(2,2)*(T/θ, δ): the 12-6 potential, or Stockmayer's for a polarity δ above nought (see `stockmayer`). */
+  | {
+      readonly kind: 'potential';
+      readonly prefactor: number;
+      readonly theta: number;
+      readonly polarity: number;
     }
   /** y = N₁ η + Σ nᵢ (T/θ)^tᵢ: a conductivity that leans on the viscosity, itself correlated. */
   | {
@@ -90,6 +107,12 @@ export function correlated(data: Correlation, T: number): number {
       const x = T / data.theta;
       return (data.prefactor * polynomial(data.numerator, x)) / polynomial(data.denominator, x);
     }
+    case 'root-ratio': {
+      const x = T / data.theta;
+      return (data.prefactor * Math.sqrt(x) * polynomial(data.numerator, x)) / polynomial(data.denominator, x);
+    }
+    case 'potential':
+      return data.prefactor * Math.sqrt(T) * fluidity(T / data.theta, data.polarity);
     case 'with-viscosity': {
       const powers = data.terms.reduce((sum, { n, t }) => sum + n * Math.pow(T / data.theta, t), 0);
       return data.perViscosity * correlated(data.viscosity, T) + powers;
