@@ -1,4 +1,5 @@
 import type { File, Item } from '../syntax/nodes';
+import { MOST_SHOWN, roundFrom } from './circle';
 import type { Declared } from './declare';
 import type { Document, Shape } from './document';
 import type { Evaluated, Outcome } from './evaluated';
@@ -66,7 +67,7 @@ function allProblems(
     const own = [
       ...evaluated(declared).problems,
       ...duplicate(document, declared),
-      ...circular(evaluation.circleOf({ document, declared }), declared),
+      ...circular({ document, declared }, evaluation),
     ];
     if (declared.name && unused.has(declared.id))
       own.push(unusedDeclaration.at(declared.name.span, { name: declared.name.text }));
@@ -78,19 +79,20 @@ function duplicate(document: Document, { name }: Declared): readonly Problem[] {
   const same = name ? (document.declarations.byName.get(name.text) ?? []) : [];
   if (!name || same.length < 2) return [];
   const related = same
+    .slice(0, MOST_SHOWN)
     .filter((other) => other.name !== name)
     .map((other) => relatedTo({ document, declared: other }, 'declared here as well'));
   return [duplicateName.at(name.span, { name: name.text }, { related })];
 }
 
-function circular(circle: readonly Place[] | undefined, declared: Declared): readonly Problem[] {
+function circular(place: Place, evaluation: Evaluation): readonly Problem[] {
+  const circle = evaluation.circleOf(place);
   if (!circle) return [];
-  const others = circle.filter((place) => place.declared !== declared);
-  const round = [declared, ...others.map((place) => place.declared)].map(({ id }) => id);
+  const { declared } = place;
+  const round = roundFrom(place, circle, (document, name) => evaluation.find(document, name));
+  const related = round.slice(1, 1 + MOST_SHOWN).map((each) => relatedTo(each, 'part of the circle'));
   const span = (declared.name ?? declared.item.declaration).span;
-  return [
-    circularDefinition.at(span, { round }, { related: others.map((place) => relatedTo(place, 'part of the circle')) }),
-  ];
+  return [circularDefinition.at(span, { round: round.map((each) => each.declared.id) }, { related })];
 }
 
 function relatedTo({ document, declared }: Place, message: string): Related {

@@ -42,7 +42,7 @@ export interface Evaluation {
 
 export function createEvaluation(sight: Sight): Evaluation {
   const done = new Map<Declared, Evaluated>();
-  const running = new Set<Declared>();
+  const running = new Map<Declared, Place>();
   const circles = new Map<Declared, readonly Place[]>();
   const prepared = new Set<Document>();
   const names = new Map<Document, string>();
@@ -63,15 +63,21 @@ export function createEvaluation(sight: Sight): Evaluation {
     prepare(place.document);
     const before = done.get(place.declared);
     if (before) return before;
-    if (running.has(place.declared)) circles.set(place.declared, [place]);
+    if (running.has(place.declared)) closeCircle(place);
     if (circles.has(place.declared)) return { outcome: failed, problems: [] };
-    running.add(place.declared);
+    running.set(place.declared, place);
     const result = remembered(place) ?? run(place);
     running.delete(place.declared);
-    // A condition may turn out to depend on what reads it.
     const final = circles.has(place.declared) ? { outcome: failed, problems: [] } : result;
     done.set(place.declared, final);
     return final;
+  };
+
+  /** A condition may turn out to depend on what reads it: all that run since it was asked for are the circle. */
+  const closeCircle = ({ declared }: Place) => {
+    const stack = [...running.values()];
+    const circle = stack.slice(stack.findIndex((each) => each.declared === declared));
+    for (const member of circle) circles.set(member.declared, circle);
   };
 
   /** Dependencies are evaluated first, so that a long chain needs no deep stack. */
