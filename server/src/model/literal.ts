@@ -6,6 +6,7 @@ import { ambiguousTemperature } from './problems/ambiguousTemperature';
 import { absoluteZero } from './problems/absoluteZero';
 import { decimalComma } from './problems/decimalComma';
 import { gaugePressure } from './problems/gaugePressure';
+import { noValue } from './problems/noValue';
 import { replacement } from './problems/problem';
 import { unknownUnit } from './problems/unknownUnit';
 import { plainNumber, quantity, show } from './quantity';
@@ -31,9 +32,13 @@ export function readLiteral(
   }
   const value = minus ? -node.value : node.value;
   const span = minus ? { start: minus.span.start, end: node.span.end } : node.span;
-  if (!node.unit) return plainNumber(value);
-  const unit = readUnit(node.unit, scope);
-  if (!unit) return undefined;
+  const unit = node.unit && readUnit(node.unit, scope);
+  if (node.unit && !unit) return undefined;
+  if (!Number.isFinite(unit ? toSI(value, unit) : value)) {
+    scope.report(noValue.at(span, { why: 'the number is too large to be represented' }));
+    return undefined;
+  }
+  if (!unit) return plainNumber(value);
   if (role === 'difference')
     return { ...quantity(toSIDifference(value, unit, reference(unit, scope)), unit.dimension), ...keptUnit(unit) };
   switch (unit.kind) {
