@@ -1,12 +1,24 @@
 import assert from 'node:assert/strict';
 import { readFileSync } from 'node:fs';
 import { problemKinds } from '../../server/src/model/problems/list';
+import { analyse } from '../support/analyse';
 import { readAnnotations } from '../support/annotations';
 import { readSections } from '../support/markdown';
 import { spec } from '../support/spec';
 import { pages, problemPages } from './pages';
 
 for (const page of pages()) spec(page);
+
+describe('the documents of the README', () => {
+  const documents = readSections(readFileSync('README.md', 'utf8')).flatMap(({ blocks }) =>
+    blocks.filter(({ word }) => word === 'gas'),
+  );
+
+  it('are there, and have no problem', () => {
+    assert.ok(documents.length > 0);
+    for (const { lines } of documents) assert.deepEqual(analyse(lines.join('\n')).problems(), []);
+  });
+});
 
 describe('the pages of the problems', () => {
   it('are there for every problem, and for no other', () => {
