@@ -30,7 +30,15 @@ export default tseslint.config(
     files: ['**/*.mjs'],
     extends: [js.configs.recommended],
     languageOptions: {
-      globals: { process: 'readonly', console: 'readonly', setTimeout: 'readonly', clearTimeout: 'readonly', URL: 'readonly', URLSearchParams: 'readonly', document: 'readonly' },
+      globals: {
+        process: 'readonly',
+        console: 'readonly',
+        setTimeout: 'readonly',
+        clearTimeout: 'readonly',
+        URL: 'readonly',
+        URLSearchParams: 'readonly',
+        document: 'readonly',
+      },
     },
   },
 );

@@ -12,9 +12,10 @@ const LAYERS: Readonly<Record<string, readonly string[]>> = {
   features: ['model', 'syntax', 'quantities'],
   report: ['features', 'model', 'syntax', 'quantities'],
   lsp: ['features', 'report', 'model', 'syntax', 'quantities'],
+  cli: ['lsp', 'features', 'report', 'model', 'syntax', 'quantities'],
   'node.ts': ['lsp'],
   'browser.ts': ['lsp'],
-  'cli.ts': ['lsp', 'features', 'report', 'model', 'syntax', 'physics', 'quantities'],
+  'cli.ts': ['cli'],
 };
 
 /** The folders that run anywhere, a worker included. */

@@ -60,7 +60,11 @@ const ratio = (title: string, above: string, below: string) => {
 console.log('');
 ratio('a keystroke against the whole, 2000 lines', 'a keystroke in 2000 lines', 'evaluate 2000 lines afresh');
 ratio('a keystroke in 2000 lines against one in 200', 'a keystroke in 2000 lines', 'a keystroke in 200 lines');
-ratio('five species against a pure gas', 'all figures of a state of five species', 'all figures of a state of a pure gas');
+ratio(
+  'five species against a pure gas',
+  'all figures of a state of five species',
+  'all figures of a state of a pure gas',
+);
 
 function workspaceOf(text: () => string) {
   return createWorkspace({ read: () => ({ text: text() }), resolve: (_from, path) => path });

@@ -1,4 +1,4 @@
-import { walk } from '../syntax/children';
+import { children, walk } from '../syntax/children';
 import type { Expression, RequireDeclaration } from '../syntax/nodes';
 import { evaluateCondition } from './comparison';
 import { requirementFails } from './problems/requirementFails';
@@ -40,18 +40,25 @@ export function describeVerdict(verdict: Verdict, condition: Expression, text: s
   const [left, ...rest] = verdict.sides;
   const first = leftOf(relation);
   const subject = text.slice(first.span.start, first.span.end);
-  const wanted = text.slice(first.span.end, relation.span.end).trim();
+  const wanted = text
+    .slice(first.span.end, relation.span.end)
+    .trim()
+    .replace(/^is\s+/, '');
   const value = left?.value ? showWithTolerance(left.value, { display }) : (left?.text ?? '');
-  const limits = rest
-    .flatMap((side) => (side.value ? [showWithTolerance(side.value, { display })] : []))
-    .filter((limit) => !wanted.includes(limit));
-  const named = /[A-Za-z_]\w*\s*\.|(?<![\d.]\s?)\b[a-z_]\w+\b/.test(
-    wanted.replace(/\b(?:is|not|within|between|and|of)\b/g, ''),
-  );
-  const explained = named && limits.length > 0 ? ` (${limits.join(', ')})` : '';
+  const limits = rest.flatMap((side) => (side.value ? [showWithTolerance(side.value, { display })] : []));
+  const explained = limits.length > 0 && namesSomething(relation, first) ? ` (${limits.join(', ')})` : '';
   const is = subject === value ? '' : `${subject} is `;
   const not = verdict.negated ? 'not ' : '';
   return `${is}${value}; wanted ${not}${wanted}${explained}`;
+}
+
+/** Whether the limits are names, whose values a reader does not see. */
+function namesSomething(relation: Expression, left: Expression): boolean {
+  let found = false;
+  for (const part of children(relation)) {
+    if (part !== left) walk(part, ({ kind }) => (found ||= kind === 'name'));
+  }
+  return found;
 }
 
 function relationAt(condition: Expression, { relation }: Verdict): Expression | undefined {

@@ -1,0 +1,46 @@
+import { renameSync, rmSync, statSync, writeFileSync } from 'node:fs';
+import { format as formatEdits } from '../features/format';
+import { applyEdits } from '../features/textEdit';
+import type { Command } from './command';
+import { readArguments, UsageError } from './command';
+import { namedFiles } from './files';
+
+export const format: Command = {
+  name: 'format',
+  summary: 'gives files their usual spacing and spelling of units',
+  help: `tenuity format [--check] FILES…
+
+Rewrites gas-state files in place: spacing, indentation and the usual spelling of units, never the order, a number or a comment.
+From the standard input (-) it writes to the standard output.
+
+  --check   write nothing; exit with 1 when a file would change
+
+  tenuity format records/
+  tenuity format - < draft.gas > neat.gas`,
+  run: async (args) => {
+    const given = readArguments(args, { check: { type: 'boolean' } });
+    const checking = given.flag('check');
+    const changed: string[] = [];
+    for (const { name, text } of namedFiles(given.files, { stdinName: undefined })) {
+      const neat = applyEdits(text, formatEdits(text));
+      if (neat !== text) changed.push(name);
+      if (name === '-' && !checking) process.stdout.write(neat);
+      else if (neat !== text && !checking) replaceFile(name, neat);
+    }
+    for (const name of changed.filter((each) => each !== '-'))
+      process.stderr.write(`${name}: ${checking ? 'would be' : 'was'} formatted\n`);
+    return Promise.resolve(checking && changed.length > 0 ? 1 : 0);
+  },
+};
+
+/** The new text is complete on the disk before it takes the old one's place, so that no file is ever lost. */
+function replaceFile(file: string, text: string): void {
+  const beside = `${file}.${process.pid}.tmp`;
+  try {
+    writeFileSync(beside, text, { mode: statSync(file).mode });
+    renameSync(beside, file);
+  } catch (error) {
+    rmSync(beside, { force: true });
+    throw new UsageError(`${file} cannot be written: ${error instanceof Error ? error.message : String(error)}`);
+  }
+}
