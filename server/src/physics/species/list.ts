@@ -49,6 +49,26 @@ import { I2 } from './I2';
 import { Hg } from './Hg';
 import { BF3 } from './BF3';
 import { AsH3 } from './AsH3';
+import { HBr } from './HBr';
+import { Cl2 } from './Cl2';
+import { Br2 } from './Br2';
+import { BCl3 } from './BCl3';
+import { NF3 } from './NF3';
+import { SiH4 } from './SiH4';
+import { SiF4 } from './SiF4';
+import { SiCl4 } from './SiCl4';
+import { SiH2Cl2 } from './SiH2Cl2';
+import { PH3 } from './PH3';
+import { GeH4 } from './GeH4';
+import { B2H6 } from './B2H6';
+import { WF6 } from './WF6';
+import { TMA } from './TMA';
+import { C2F6 } from './C2F6';
+import { cC4F8 } from './cC4F8';
+import { CCl4 } from './CCl4';
+import { toluene } from './toluene';
+import { isopropanol } from './isopropanol';
+import { CH3OCH3 } from './CH3OCH3';
 import type { Species } from './species';
 
 /** Every gas the program knows by itself. A new one needs its file, its line here, and its reference rows. */
@@ -104,6 +124,26 @@ export const speciesList: readonly Species[] = [
   Hg,
   BF3,
   AsH3,
+  HBr,
+  Cl2,
+  Br2,
+  BCl3,
+  NF3,
+  SiH4,
+  SiF4,
+  SiCl4,
+  SiH2Cl2,
+  PH3,
+  GeH4,
+  B2H6,
+  WF6,
+  TMA,
+  C2F6,
+  cC4F8,
+  CCl4,
+  toluene,
+  isopropanol,
+  CH3OCH3,
 ];
 
 /** A gas by its formula or by one of its common names. */

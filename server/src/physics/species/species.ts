@@ -61,6 +61,8 @@ export type Hazard =
   | 'reproductive toxicity'
   | 'specific target organ toxicity'
   | 'skin corrosion'
+  | 'skin irritation'
   | 'serious eye irritation'
   | 'hazardous to the aquatic environment'
+  | 'hazardous to the ozone layer'
   | 'simple asphyxiant';

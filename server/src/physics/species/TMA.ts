@@ -1,0 +1,13 @@
+import type { Species } from './species';
+
+/** The single molecule Al(CH₃)₃: near room temperature the vapour is mostly the dimer, of twice the molar mass. */
+export const TMA: Species = {
+  formula: 'TMA',
+  names: ['trimethylaluminium', 'trimethylaluminum'],
+  molarMass: { value: 72.087e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 2e-4 },
+  hazards: [
+    { value: 'pyrophoric liquid', source: 'CLP 2008', where: 'Pyr. Liq. 1, H250; from memory' },
+    { value: 'emits flammable gas with water', source: 'CLP 2008', where: 'Water-react. 1, H260; from memory' },
+    { value: 'skin corrosion', source: 'CLP 2008', where: 'Skin Corr. 1B, H314; from memory' },
+  ],
+};
