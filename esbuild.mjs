@@ -1,15 +1,17 @@
 // Bundles what ships (dist/), and with --tests what the tests run (out/).
-import { existsSync, readdirSync, rmSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { build } from 'esbuild';
 
 const root = import.meta.dirname;
+const { version } = JSON.parse(readFileSync(path.join(root, 'package.json'), 'utf8'));
 const common = {
   absWorkingDir: root,
   bundle: true,
   sourcemap: 'linked',
   target: 'es2022',
   logLevel: 'warning',
+  define: { TENUITY_VERSION: JSON.stringify(version) },
   minify: process.argv.includes('--minify'),
 };
 const node = { ...common, platform: 'node', format: 'cjs', mainFields: ['module', 'main'] };

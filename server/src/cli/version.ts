@@ -1,3 +1,4 @@
-import { version } from '../../../package.json';
+/** Put in by the build, from package.json. */
+declare const TENUITY_VERSION: string;
 
-export const VERSION: string = version;
+export const VERSION: string = TENUITY_VERSION;
