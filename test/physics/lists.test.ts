@@ -2,6 +2,7 @@ import assert from 'node:assert/strict';
 import { speciesByName, speciesList } from '../../server/src/physics/species/list';
 import { sources } from '../../server/src/physics/sources';
 import { statePropertyNamed, stateProperties } from '../../server/src/physics/state/properties';
+import { measuredVirial } from '../../server/src/physics/thermo/measuredVirial';
 import { measuredDiffusionSource } from '../../server/src/physics/transport/measuredDiffusion';
 import { everyFigure, figures, mixture, valueOf } from '../support/gases';
 
@@ -9,7 +10,7 @@ describe('lists', () => {
   it('hold every output of a state, once', () => {
     const names = stateProperties.map(({ name }) => name);
     assert.equal(new Set(names).size, names.length);
-    assert.equal(names.length, 38);
+    assert.equal(names.length, 40);
     for (const name of names) assert.equal(statePropertyNamed(name)?.name, name);
     for (const row of stateProperties) assert.equal(row.perSpecies, row.computeFor !== undefined, row.name);
   });
@@ -23,7 +24,7 @@ describe('lists', () => {
   });
 
   it('cite nothing in vain', () => {
-    const data = JSON.stringify([speciesList, stateProperties, measuredDiffusionSource]);
+    const data = JSON.stringify([speciesList, stateProperties, measuredDiffusionSource, measuredVirial('H2O')]);
     const methods = figures(mixture({ N2: 0.5, Ar: 0.5 }), 300, 1);
     const cited = data + JSON.stringify(everyFigure(methods));
     for (const [id, { authors, year }] of Object.entries(sources)) {

@@ -46,6 +46,13 @@ const meanings: Readonly<{ [name: string]: string | Omit<ResultDefinition, 'name
   impingement_rate: 'molecules that strike a wall (Hertz–Knudsen)',
   mass_flux: 'the mass that strikes a wall',
   monolayer_time: 'how long a clean surface takes to be covered if every molecule stays',
+  compressibility_factor: 'the molar volume against that of the ideal gas, from the second virial coefficient',
+  second_virial: {
+    symbol: 'B',
+    quantityKind: 'molar_volume',
+    unit: 'cm³/mol',
+    meaning: 'how pairs of molecules bend the gas away from the ideal-gas law, Z = 1 + Bp/(RT)',
+  },
   saturation_pressure: 'the pressure at which the vapour would be in equilibrium with its liquid or solid',
   condensation_margin:
     'saturation pressure over partial pressure: above 1 the vapour is dry, below 1 it condenses or freezes',

@@ -70,7 +70,17 @@ export type Note =
       readonly limit: number;
       readonly spacing: number;
       readonly diameter: number;
-    };
+    }
+  /** A vapour is above its saturation pressure, which is known unless it is colder than the data reach. */
+  | {
+      readonly kind: 'condensing';
+      readonly species: string;
+      readonly phase: 'solid' | 'liquid';
+      readonly pressure: number;
+      readonly saturation?: number;
+    }
+  /** The gas departs from the ideal-gas law by Z − 1, as the second virial coefficient tells. */
+  | { readonly kind: 'not-ideal'; readonly departure: number; readonly limit: number };
 
 /** The sorts of data that a species may have or lack. */
 export type DataKind =

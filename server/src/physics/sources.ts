@@ -354,6 +354,35 @@ export const sources = {
     year: 2014,
     published: 'CRC Press',
   },
+  'Tsonopoulos 1974': {
+    authors: 'Tsonopoulos, C.',
+    title: 'An empirical correlation of second virial coefficients',
+    year: 1974,
+    published: 'AIChE J. 20, 263',
+    doi: '10.1002/aic.690200209',
+  },
+  'Gunn 1966': {
+    authors: 'Gunn, R. D.; Chueh, P. L.; Prausnitz, J. M.',
+    title: 'Prediction of thermodynamic properties of dense gas mixtures containing one or more of the quantum gases',
+    year: 1966,
+    published: 'AIChE J. 12, 937',
+    doi: '10.1002/aic.690120519',
+  },
+  'Chueh & Prausnitz 1967': {
+    authors: 'Chueh, P. L.; Prausnitz, J. M.',
+    title:
+      'Vapor-liquid equilibria at high pressures. Vapor-phase fugacity coefficients in nonpolar and quantum-gas mixtures',
+    year: 1967,
+    published: 'Ind. Eng. Chem. Fundam. 6, 492',
+    doi: '10.1021/i160024a003',
+  },
+  'Harvey & Lemmon 2004': {
+    authors: 'Harvey, A. H.; Lemmon, E. W.',
+    title: 'Correlation for the second virial coefficient of water',
+    year: 2004,
+    published: 'J. Phys. Chem. Ref. Data 33, 369',
+    doi: '10.1063/1.1587731',
+  },
   'CLP 2008': {
     authors: 'European Parliament and Council',
     title: 'Regulation (EC) No 1272/2008 on classification, labelling and packaging of substances and mixtures',

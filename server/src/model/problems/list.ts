@@ -1,6 +1,7 @@
 import { absoluteZero } from './absoluteZero';
 import { ambiguousTemperature } from './ambiguousTemperature';
 import { circularDefinition } from './circularDefinition';
+import { condensing } from './condensing';
 import { contradictoryInput } from './contradictoryInput';
 import { decimalComma } from './decimalComma';
 import { duplicateKey } from './duplicateKey';
@@ -14,6 +15,7 @@ import { mixedParts } from './mixedParts';
 import { noData } from './noData';
 import { noValue } from './noValue';
 import { notComputedYet } from './notComputedYet';
+import { notIdeal } from './notIdeal';
 import { outOfBounds } from './outOfBounds';
 import { outsideRange } from './outsideRange';
 import { requirementFails } from './requirementFails';
@@ -38,6 +40,7 @@ export const problemKinds: readonly Omit<ProblemDefinition<never>, 'message' | '
   absoluteZero,
   ambiguousTemperature,
   circularDefinition,
+  condensing,
   contradictoryInput,
   decimalComma,
   duplicateKey,
@@ -51,6 +54,7 @@ export const problemKinds: readonly Omit<ProblemDefinition<never>, 'message' | '
   noData,
   noValue,
   notComputedYet,
+  notIdeal,
   outOfBounds,
   outsideRange,
   requirementFails,

@@ -1,12 +1,12 @@
-import { h, k } from '../constants';
 import type { Note, Outcome } from '../outcome';
 import { failure, success } from '../outcome';
-import type { GasState } from './gasState';
 import { gasState } from './gasState';
 import type { ModelError } from './modelErrors';
 import { modelErrors } from './modelErrors';
 import type { StateRequest, Trial } from './request';
+import { notesOf } from './notes';
 import { stateProperties } from './properties';
+import type { StateProperty } from './property';
 import type { Provenance } from './provenance';
 import { provenanceTable } from './provenance';
 
@@ -34,24 +34,25 @@ export function evaluateState(request: StateRequest, trial: Trial = noTrial): St
   const table = provenanceTable(request.composition);
   const mixture = new Map<string, Outcome<Figure>>();
   stateProperties.forEach((row, at) => {
-    mixture.set(row.name, figure(row.name, row.compute(state), table.mixture[at]));
+    mixture.set(row.name, figure(row, row.compute(state), table.mixture[at]));
   });
   const species = new Map<string, ReadonlyMap<string, Outcome<Figure>>>();
   state.species.forEach((one, i) => {
     const figures = new Map<string, Outcome<Figure>>();
     stateProperties.forEach((row, at) => {
       if (row.computeFor === undefined) return;
-      figures.set(row.name, figure(row.name, row.computeFor(one, state), table.species[i]?.[at]));
+      figures.set(row.name, figure(row, row.computeFor(one, state), table.species[i]?.[at]));
     });
     species.set(one.species.formula, figures);
   });
   return { mixture, species, modelErrors: modelErrors(request), notes: notesOf(state) };
 }
 
-function figure(quantity: string, outcome: Outcome<number>, provenance: Provenance | undefined): Outcome<Figure> {
+function figure(row: StateProperty, outcome: Outcome<number>, provenance: Provenance | undefined): Outcome<Figure> {
   if (!outcome.ok) return outcome;
   const { value } = outcome;
-  if (!isSound(value) || provenance === undefined) return failure({ kind: 'not-finite', quantity });
+  const magnitude = row.signed ? Math.abs(value) : value;
+  if (!isSound(magnitude) || provenance === undefined) return failure({ kind: 'not-finite', quantity: row.name });
   const { method, sources, range } = provenance;
   return success(range === undefined ? { value, method, sources } : { value, method, sources, range }, outcome.notes);
 }
@@ -62,42 +63,3 @@ function isSound(value: number): boolean {
 }
 
 const smallestNormal = 2.2250738585072014e-308;
-
-/** The first quantum correction to the pressure is n Λ³ / 2^(5/2): at this limit nearly 1 %. */
-const degeneracyLimit = 0.05;
-
-/** The first correction for the volume of the molecules is 2π/3 n d³: at this limit 1 %. */
-const covolumeLimit = 0.01;
-
-function notesOf(state: GasState): readonly Note[] {
-  const notes: Note[] = [];
-  for (const one of state.species) {
-    for (const data of [one.viscosity, one.conductivity, one.cp]) {
-      if (data.ok) notes.push(...data.notes.filter((note) => !notes.includes(note)));
-    }
-    const wavelength = h / Math.sqrt(2 * Math.PI * one.mass * k * state.point.temperature);
-    const degeneracy = one.numberDensity * wavelength ** 3;
-    if (degeneracyLimit < degeneracy) {
-      notes.push({ kind: 'quantum', species: one.species.formula, degeneracy, limit: degeneracyLimit });
-    }
-  }
-  const dense = densityNote(state);
-  return dense === undefined ? notes : [...notes, dense];
-}
-
-function densityNote({ species, point }: GasState): Note | undefined {
-  let cubes = 0;
-  for (const one of species) {
-    if (!one.diameter.ok) return undefined;
-    cubes += one.moleFraction * one.diameter.value ** 3;
-  }
-  const covolume = ((2 * Math.PI) / 3) * point.numberDensity * cubes;
-  if (covolume <= covolumeLimit) return undefined;
-  return {
-    kind: 'dense',
-    covolume,
-    limit: covolumeLimit,
-    spacing: 1 / Math.cbrt(point.numberDensity),
-    diameter: Math.cbrt(cubes),
-  };
-}

@@ -4,6 +4,7 @@ import { N_A } from '../constants';
 import type { Outcome } from '../outcome';
 import { all, failure, map, map2 } from '../outcome';
 import type { LennardJones } from '../species/species';
+import { secondVirial } from '../thermo/virial';
 import { mixtureConductivity } from '../transport/conductivity';
 import { diffusionInMixture, isMeasured, pairDiffusion, selfDiffusivity } from '../transport/diffusion';
 import { mixtureViscosity } from '../transport/mixtureViscosity';
@@ -13,7 +14,7 @@ import type { StatePoint } from './closure';
 import type { StateRequest, Trial } from './request';
 import { factor } from './request';
 import type { SpeciesAlone } from './speciesAlone';
-import { speciesAlone } from './speciesAlone';
+import { speciesAlone, virialOnTrial } from './speciesAlone';
 
 /** The material data of a gas at one state, each worked out once, from which every figure follows. */
 export interface GasState {
@@ -25,6 +26,8 @@ export interface GasState {
   readonly density: number;
   /** J/(mol K). */
   readonly cp: Outcome<number>;
+  /** Second virial coefficient, m³/mol. */
+  readonly virial: Outcome<number>;
   /** Pa s. */
   readonly viscosity: Outcome<number>;
   /** W/(m K). */
@@ -56,6 +59,7 @@ export function gasState(request: StateRequest, trial: Trial): GasState {
     point,
     molarMass,
     density: point.numberDensity * (molarMass / N_A),
+    virial: virialOnTrial(secondVirial(composition, point.temperature), trial),
     cp: map(heats, (values) => weighted(x, values)),
     viscosity: ofMixture(viscosities, () =>
       map2(viscosities, pairs, (own, pair) => {

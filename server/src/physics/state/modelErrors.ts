@@ -5,6 +5,7 @@ import { conductionMethod } from '../transport/conductivity';
 import type { Correlation } from '../transport/correlation';
 import { heatCapacityRange } from '../thermo/heatCapacity';
 import { dewPoint, saturationPressure } from '../thermo/saturation';
+import { secondVirial, virialError } from '../thermo/virial';
 import type { Species } from '../species/species';
 import type { StateRequest } from './request';
 
@@ -38,6 +39,7 @@ export function modelErrors({ composition, point }: StateRequest): ModelError[] 
     ...heatError(one, point.temperature),
     ...saturationError(one, point.temperature, (composition.moleFractions[i] ?? 0) * point.pressure),
   ]);
+  if (secondVirial(composition, point.temperature).ok) errors.push({ key: 'second_virial', relative: virialError });
   const conducting = species.filter((one) => one.viscosity !== undefined && one.heatCapacity !== undefined);
   const methods = new Set(conducting.map(conductionMethod));
   if (methods.has('monatomic')) errors.push(method('monatomic_conductivity'));

@@ -1,6 +1,7 @@
 import { amountProperties } from './amounts';
 import { condensationProperties } from './condensation';
 import { kineticProperties } from './kinetic';
+import { nonIdealityProperties } from './nonIdeality';
 import type { StateProperty } from './property';
 import { thermalProperties } from './thermal';
 
@@ -9,6 +10,7 @@ export const stateProperties: readonly StateProperty[] = [
   ...amountProperties,
   ...kineticProperties,
   ...thermalProperties,
+  ...nonIdealityProperties,
   ...condensationProperties,
 ];
 

@@ -12,6 +12,8 @@ export interface StateProperty {
   readonly quantityKind: string;
   /** Whether each species has a figure of its own. */
   readonly perSpecies: boolean;
+  /** Whether it may be below zero, which for all others would be a fault. */
+  readonly signed?: true;
   /** The method by its usual name, and where it is published. */
   readonly method: string;
   readonly sources: readonly SourceId[];

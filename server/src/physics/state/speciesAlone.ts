@@ -1,9 +1,12 @@
+import { pure } from '../composition';
 import { k, N_A, R } from '../constants';
 import type { Outcome } from '../outcome';
 import { failure, map, map2, success } from '../outcome';
 import type { Species } from '../species/species';
 import { dewPoint, saturationPressure } from '../thermo/saturation';
 import { heatCapacityRange, molarHeatCapacity } from '../thermo/heatCapacity';
+import type { Virial } from '../thermo/virial';
+import { secondVirial } from '../thermo/virial';
 import { conductionMethod, correlatedConductivity, kineticConductivity } from '../transport/conductivity';
 import { diameterOfViscosity, viscosity } from '../transport/viscosity';
 import type { StateRequest, Trial } from './request';
@@ -25,6 +28,8 @@ export interface SpeciesAlone {
   readonly conductivity: Outcome<number>;
   /** Hard-sphere diameter, m. */
   readonly diameter: Outcome<number>;
+  /** Second virial coefficient, m³/mol. */
+  readonly virial: Outcome<number>;
   /** Saturation pressure, Pa. */
   readonly saturation: Outcome<number>;
   /** The temperature, K, at which it is the partial pressure. */
@@ -52,9 +57,16 @@ export function speciesAlone(
     viscosity: eta,
     conductivity: conductivity(species, eta, cp, T, trial),
     diameter: diameter(species, eta, request),
+    virial: virialOnTrial(secondVirial(pure(species), T), trial),
     saturation: map(saturationPressure(species, T), (value) => value * saturationScale),
     dewPoint: dewPoint(species, (moleFraction * request.point.pressure) / saturationScale),
   };
+}
+
+/** B itself may be nought, so its error is counted in the volume that goes with it. */
+export function virialOnTrial(virial: Outcome<Virial>, trial: Trial): Outcome<number> {
+  const excess = factor(trial, 'second_virial') - 1;
+  return map(virial, ({ coefficient, scale }) => coefficient + excess * scale);
 }
 
 function heatCapacity(species: Species, T: number, trial: Trial): Outcome<number> {
