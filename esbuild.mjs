@@ -12,7 +12,6 @@ const common = {
   target: 'es2022',
   logLevel: 'warning',
   define: { TENUITY_VERSION: JSON.stringify(version) },
-  minify: process.argv.includes('--minify'),
 };
 const node = { ...common, platform: 'node', format: 'cjs', mainFields: ['module', 'main'] };
 const browser = { ...common, platform: 'browser', external: ['vscode'] };
@@ -51,4 +50,5 @@ const tests = [
 
 // What was built for a test that is gone must not run.
 if (process.argv.includes('--tests')) rmSync(path.join(root, 'out/test'), { recursive: true, force: true });
-await Promise.all((process.argv.includes('--tests') ? tests : shipped).map((bundle) => build(bundle)));
+const bundles = process.argv.includes('--tests') ? tests : shipped.map((bundle) => ({ ...bundle, minify: true }));
+await Promise.all(bundles.map((bundle) => build(bundle)));

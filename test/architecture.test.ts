@@ -23,12 +23,14 @@ const CORE = ['quantities', 'physics', 'syntax', 'model', 'features', 'report'];
 
 /**
  * The one knot of files that need each other when they run: an expression consists of expressions, so its forms call back to
- * where they are told apart; and a name may stand for a result of a kind, whose inputs are expressions again.
+ * where they are told apart; and a name may stand for a result of a kind, whose inputs are expressions again. All kinds are
+ * part of it, so that adding one needs no word here.
  */
 const KNOT = [
-  ...['call', 'comparison', 'expression', 'inputs', 'member', 'mixture', 'mixtureParts', 'sum', 'table', 'toleranced'],
-  ...['kinds/inlet', 'kinds/list', 'kinds/orifice', 'kinds/state', 'kinds/tube'],
+  ...['call', 'comparison', 'expression', 'inputs', 'member'],
+  ...['mixture', 'mixtureParts', 'sum', 'table', 'toleranced'],
 ].map((file) => `server/src/model/${file}.ts`);
+const KINDS = 'server/src/model/kinds/';
 
 interface Import {
   readonly from: string;
@@ -89,7 +91,7 @@ describe('the architecture', () => {
     for (const { from, to, typeOnly } of imports) if (to && !typeOnly && edges.has(to)) edges.get(from)?.push(to);
     const circles = components(sources, (file) => edges.get(file) ?? []).filter(({ circular }) => circular);
     assert.deepEqual(
-      circles.map(({ members }) => [...members].sort()),
+      circles.map(({ members }) => members.filter((file) => !file.startsWith(KINDS)).sort()),
       [[...KNOT].sort()],
     );
   });

@@ -1,7 +1,7 @@
 import assert from 'node:assert/strict';
 import { describe, it } from 'mocha';
-import { completion } from '../../server/src/features/completion';
-import type { CompletionItem } from '../../server/src/features/completionItem';
+import { completion } from '../../server/src/features/completion/completion';
+import type { CompletionItem } from '../../server/src/features/completion/completionItem';
 import { kinds } from '../../server/src/model/kinds/list';
 import { statements } from '../../server/src/model/kinds/statements';
 import { analyse, cursor } from '../support/analyse';

@@ -1,6 +1,6 @@
 import assert from 'node:assert/strict';
 import { folding } from '../../server/src/features/folding';
-import { format } from '../../server/src/features/format';
+import { format } from '../../server/src/features/format/format';
 import { links } from '../../server/src/features/links';
 import { definition, highlights, references } from '../../server/src/features/navigation';
 import type { OutlineItem } from '../../server/src/features/outline';

@@ -1,7 +1,7 @@
 import assert from 'node:assert/strict';
 import fc from 'fast-check';
-import { format } from '../../server/src/features/format';
-import { canonicalUnit } from '../../server/src/features/formatSpacing';
+import { format } from '../../server/src/features/format/format';
+import { canonicalUnit } from '../../server/src/features/format/formatSpacing';
 import { applyEdits } from '../../server/src/features/textEdit';
 import { tokensOf } from '../../server/src/features/tokens';
 import { parse } from '../../server/src/syntax/parse';

@@ -1,7 +1,7 @@
 import assert from 'node:assert/strict';
 import { describe, it } from 'mocha';
-import { hover } from '../../server/src/features/hover';
-import { describeRecord } from '../../server/src/features/describe';
+import { hover } from '../../server/src/features/hover/hover';
+import { describeRecord } from '../../server/src/features/describe/describe';
 import { gasNames } from '../../server/src/model/mixture';
 import { analyse, cursor } from '../support/analyse';
 

@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import { hover } from '../../server/src/features/hover';
+import { hover } from '../../server/src/features/hover/hover';
 import { inlayHints } from '../../server/src/features/inlayHints';
 import { speciesList } from '../../server/src/physics/species/list';
 import { allSpellings } from '../../server/src/quantities/unitSpellings';

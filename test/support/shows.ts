@@ -1,5 +1,5 @@
 import assert from 'node:assert/strict';
-import { hover } from '../../server/src/features/hover';
+import { hover } from '../../server/src/features/hover/hover';
 import { inlayHints } from '../../server/src/features/inlayHints';
 import type { Analysis } from '../../server/src/model/analysis';
 import { printTree } from '../../server/src/syntax/print';

@@ -1,5 +1,5 @@
 import { renameSync, rmSync, statSync, writeFileSync } from 'node:fs';
-import { format as formatEdits } from '../features/format';
+import { format as formatEdits } from '../features/format/format';
 import { applyEdits } from '../features/textEdit';
 import type { Command } from './command';
 import { readArguments, UsageError } from './command';

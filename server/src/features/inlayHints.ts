@@ -9,9 +9,9 @@ import { halfWidth } from '../model/tolerance';
 import type { Members, Quantity, Value, Verdict } from '../model/values';
 import { parseUnit } from '../quantities/parseUnit';
 import type { Declaration, Expression } from '../syntax/nodes';
-import { describeFigure, showing } from './describe';
-import { describeStatus } from './describeStatus';
-import { code, plainText } from './hoverMarkdown';
+import { describeFigure, showing } from './describe/describe';
+import { describeStatus } from './describe/describeStatus';
+import { code, plainText } from './hover/hoverMarkdown';
 
 export interface HintSettings {
   readonly enabled: 'all' | 'failing' | 'off';

@@ -2,8 +2,8 @@ import type { Analysis } from '../model/analysis';
 import type { Declared } from '../model/declare';
 import { kindOfWord } from '../model/kinds/list';
 import type { BlockItem, Declaration, Node, RequireDeclaration, Span } from '../syntax/nodes';
-import { showing } from './describe';
-import { describeShortly } from './describeShortly';
+import { showing } from './describe/describe';
+import { describeShortly } from './describe/describeShortly';
 
 export type SymbolKind =
   'variable' | 'constant' | 'object' | 'struct' | 'class' | 'module' | 'boolean' | 'file' | 'property' | 'field';

@@ -1,5 +1,5 @@
 import type { HintSettings } from '../features/inlayHints';
-import type { HoverSettings } from '../features/hover';
+import type { HoverSettings } from '../features/hover/hover';
 
 /** The user's settings, complete: what is missing or makes no sense is as the manifest has it by default. */
 export interface Settings {

@@ -11,7 +11,7 @@ import { statements } from '../model/kinds/statements';
 import { builtInGas, gasNames } from '../model/mixture';
 import { problemKinds } from '../model/problems/list';
 import { results } from '../model/results';
-import { hoverSpecies } from '../features/hoverGas';
+import { hoverSpecies } from '../features/hover/hoverGas';
 
 /** A sort of thing that can be explained: its names, and what there is to say of one. */
 interface Shelf {

@@ -1,9 +1,9 @@
 import type { Analysis, LocatedProblem } from '../model/analysis';
 import type { Declared } from '../model/declare';
 import type { Severity } from '../model/problems/problem';
-import { describeRecord, showing } from '../features/describe';
-import { describePercent } from '../features/describePercent';
-import { describeShortly } from '../features/describeShortly';
+import { describeRecord, showing } from '../features/describe/describe';
+import { describePercent } from '../features/describe/describePercent';
+import { describeShortly } from '../features/describe/describeShortly';
 import type { LineIndex } from '../features/lines';
 import { lineIndex } from '../features/lines';
 import { aligned, columnsOf } from './columns';

@@ -1,7 +1,7 @@
 import type { CompletionItem as ProtocolItem } from 'vscode-languageserver';
 import { CompletionItemKind, InsertTextFormat } from 'vscode-languageserver';
 import type { TextDocument } from 'vscode-languageserver-textdocument';
-import type { CompletionItem, CompletionKind } from '../../features/completionItem';
+import type { CompletionItem, CompletionKind } from '../../features/completion/completionItem';
 import type { Abilities } from '../abilities';
 import { toMarkup } from './markup';
 import { toRange } from './range';

@@ -1,6 +1,6 @@
 import type { Hover as ProtocolHover } from 'vscode-languageserver';
 import type { TextDocument } from 'vscode-languageserver-textdocument';
-import type { Hover } from '../../features/hover';
+import type { Hover } from '../../features/hover/hover';
 import type { Abilities } from '../abilities';
 import { toMarkup } from './markup';
 import { toRange } from './range';

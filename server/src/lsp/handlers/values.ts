@@ -1,4 +1,4 @@
-import { hover } from '../../features/hover';
+import { hover } from '../../features/hover/hover';
 import { inlayHints } from '../../features/inlayHints';
 import { signatureHelp } from '../../features/signatureHelp';
 import { toHint } from '../convert/hint';

@@ -1,7 +1,7 @@
 import type { CodeAction as ProtocolAction } from 'vscode-languageserver';
 import { codeActions, fixAll } from '../../features/codeActions';
-import { completion } from '../../features/completion';
-import { format } from '../../features/format';
+import { completion } from '../../features/completion/completion';
+import { format } from '../../features/format/format';
 import { fixAllKind, isAsked, toCodeAction } from '../convert/codeAction';
 import { toCompletionItem } from '../convert/completion';
 import { toTextEdit, toWorkspaceEdit } from '../convert/edit';
