@@ -8,6 +8,7 @@ import type { Mixture, MixturePart, Name } from '../syntax/nodes';
 import { add, divide, multiply, subtract } from './arithmetic';
 import { describeValue } from './expression';
 import { figure } from './figures';
+import { reportGasRemarks } from './gasRemarks';
 import type { Part } from './mixtureParts';
 import { readParts } from './mixtureParts';
 import { unknownName } from './problems/unknownName';
@@ -21,9 +22,18 @@ import { kindNamed } from '../quantities/quantityKinds';
 /** The gas that a mixture describes: a single gas, or parts with their shares. */
 export function evaluateMixture(node: Mixture, scope: Scope): Gas | undefined {
   const [only, second] = node.parts;
-  if (only && !second && !only.amount) return gasNamed(only.name, scope);
+  if (only && !second && !only.amount) return singleGas(only.name, scope);
   const parts = readParts(node, scope, (name) => gasNamed(name, scope));
-  return parts && blend(parts);
+  const gas = parts && blend(parts);
+  if (gas) reportGasRemarks(gas, node.span, scope);
+  return gas;
+}
+
+/** A gas by its name alone. One that a file declares has had its remarks there. */
+function singleGas(node: MixturePart['name'], scope: Scope): Gas | undefined {
+  const gas = gasNamed(node, scope);
+  if (gas && node.kind === 'name' && gas === builtInGas(node.text)) reportGasRemarks(gas, node.span, scope);
+  return gas;
 }
 
 /** A gas declared in a file, or a built-in species. */

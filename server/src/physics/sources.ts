@@ -383,6 +383,20 @@ export const sources = {
     published: 'J. Phys. Chem. Ref. Data 33, 369',
     doi: '10.1063/1.1587731',
   },
+  'Chase 1998': {
+    authors: 'Chase, M. W.',
+    title: 'NIST-JANAF thermochemical tables, 4th ed.',
+    year: 1998,
+    published: 'J. Phys. Chem. Ref. Data, Monograph 9',
+  },
+  'Laubengayer 1941': {
+    authors: 'Laubengayer, A. W.; Gilliam, W. F.',
+    title:
+      'The alkyls of the third group elements. I. Vapor phase studies of the alkyls of aluminum, gallium and indium',
+    year: 1941,
+    published: 'J. Am. Chem. Soc. 63, 477',
+    doi: '10.1021/ja01847a031',
+  },
   'CLP 2008': {
     authors: 'European Parliament and Council',
     title: 'Regulation (EC) No 1272/2008 on classification, labelling and packaging of substances and mixtures',

@@ -1,5 +1,6 @@
 import { absoluteZero } from './absoluteZero';
 import { ambiguousTemperature } from './ambiguousTemperature';
+import { associating } from './associating';
 import { circularDefinition } from './circularDefinition';
 import { condensing } from './condensing';
 import { contradictoryInput } from './contradictoryInput';
@@ -9,6 +10,7 @@ import { duplicateName } from './duplicateName';
 import { fileNotFound } from './fileNotFound';
 import { fractionsSum } from './fractionsSum';
 import { gaugePressure } from './gaugePressure';
+import { hazard } from './hazard';
 import { missingInput } from './missingInput';
 import { missingUnit } from './missingUnit';
 import { mixedParts } from './mixedParts';
@@ -39,6 +41,7 @@ import type { ProblemDefinition } from './problem';
 export const problemKinds: readonly Omit<ProblemDefinition<never>, 'message' | 'fixes'>[] = [
   absoluteZero,
   ambiguousTemperature,
+  associating,
   circularDefinition,
   condensing,
   contradictoryInput,
@@ -48,6 +51,7 @@ export const problemKinds: readonly Omit<ProblemDefinition<never>, 'message' | '
   fileNotFound,
   fractionsSum,
   gaugePressure,
+  hazard,
   missingInput,
   missingUnit,
   mixedParts,

@@ -36,6 +36,7 @@ export const HF: Species = {
   },
   lennardJones: { value: potential, source: 'Svehla 1962', where: 'table I(a)' },
   dipoleMoment: { value: 6.07e-30, source: 'Nelson 1967', where: '1.82 D; from memory' },
+  associates: { value: '(HF)₆ and other clusters', source: 'Chase 1998', where: 'HF and its polymers; from memory' },
   hazards: [
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 2, H330; from memory' },
     { value: 'acute toxicity, dermal', source: 'CLP 2008', where: 'Acute Tox. 1, H310; from memory' },

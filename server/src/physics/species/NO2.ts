@@ -40,6 +40,7 @@ export const NO2: Species = {
     where: 'table 1, nitrogen dioxide, 200 to 6000 K',
     uncertainty: 0.01,
   },
+  associates: { value: 'N2O4', source: 'Chase 1998', where: 'NO2 and N2O4; from memory' },
   hazards: [
     { value: 'oxidising gas', source: 'CLP 2008', where: 'Ox. Gas 1, H270; from memory' },
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 2, H330; from memory' },

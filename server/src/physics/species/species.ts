@@ -21,6 +21,8 @@ export interface Species {
   /** Electric dipole moment, C m, of a polar molecule. */
   readonly dipoleMoment?: Sourced<number>;
   readonly critical?: Sourced<CriticalPoint>;
+  /** What its molecules join to, in part, or come from, where the vapour is not of one kind. */
+  readonly associates?: Sourced<string>;
   readonly hazards: readonly Sourced<Hazard>[];
   /** Mole fractions of what a blend consists of. */
   readonly blend?: Sourced<Readonly<Record<string, number>>>;
