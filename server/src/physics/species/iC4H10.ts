@@ -5,7 +5,7 @@ const potential = { diameter: 5.278e-10, wellDepth: 330.1 };
 
 export const iC4H10: Species = {
   formula: 'iC4H10',
-  names: ['isobutane', 'i_butane', '2-methylpropane'],
+  names: ['isobutane'],
   molarMass: { value: 58.124e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 2e-4 },
   viscosity: {
     value: viscosityOfPotential(potential, 58.124e-3, { low: 200, high: 1500 }),

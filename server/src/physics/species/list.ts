@@ -26,7 +26,7 @@ import { iC4H10 } from './iC4H10';
 import { C6H6 } from './C6H6';
 import { CH3OH } from './CH3OH';
 import { C2H5OH } from './C2H5OH';
-import { acetone } from './acetone';
+import { CH3COCH3 } from './CH3COCH3';
 import { CH3Cl } from './CH3Cl';
 import { CH2Cl2 } from './CH2Cl2';
 import { CHCl3 } from './CHCl3';
@@ -62,12 +62,12 @@ import { PH3 } from './PH3';
 import { GeH4 } from './GeH4';
 import { B2H6 } from './B2H6';
 import { WF6 } from './WF6';
-import { TMA } from './TMA';
+import { AlC3H9 } from './AlC3H9';
 import { C2F6 } from './C2F6';
 import { cC4F8 } from './cC4F8';
 import { CCl4 } from './CCl4';
-import { toluene } from './toluene';
-import { isopropanol } from './isopropanol';
+import { C7H8 } from './C7H8';
+import { iC3H7OH } from './iC3H7OH';
 import { CH3OCH3 } from './CH3OCH3';
 import type { Species } from './species';
 
@@ -101,7 +101,7 @@ export const speciesList: readonly Species[] = [
   C6H6,
   CH3OH,
   C2H5OH,
-  acetone,
+  CH3COCH3,
   CH3Cl,
   CH2Cl2,
   CHCl3,
@@ -137,12 +137,12 @@ export const speciesList: readonly Species[] = [
   GeH4,
   B2H6,
   WF6,
-  TMA,
+  AlC3H9,
   C2F6,
   cC4F8,
   CCl4,
-  toluene,
-  isopropanol,
+  C7H8,
+  iC3H7OH,
   CH3OCH3,
 ];
 

@@ -5,7 +5,7 @@ const potential = { diameter: 4.687e-10, wellDepth: 531.4 };
 
 export const nC4H10: Species = {
   formula: 'nC4H10',
-  names: ['n-butane', 'n_butane', 'butane'],
+  names: ['butane', 'n_butane'],
   molarMass: { value: 58.124e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 2e-4 },
   viscosity: {
     value: viscosityOfPotential(potential, 58.124e-3, { low: 200, high: 1500 }),

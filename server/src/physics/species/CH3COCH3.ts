@@ -3,9 +3,9 @@ import type { Species } from './species';
 
 const potential = { diameter: 4.6e-10, wellDepth: 560.2 };
 
-export const acetone: Species = {
-  formula: 'acetone',
-  names: ['propanone'],
+export const CH3COCH3: Species = {
+  formula: 'CH3COCH3',
+  names: ['acetone', 'propanone'],
   molarMass: { value: 58.08e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 2e-4 },
   viscosity: {
     value: viscosityOfPotential(potential, 58.08e-3, { low: 200, high: 1500 }),
@@ -30,7 +30,7 @@ export const acetone: Species = {
       ],
     },
     source: 'McBride 2002',
-    where: 'table 1, propanone, 200 to 6000 K',
+    where: 'table 1, acetone, 200 to 6000 K',
     uncertainty: 0.01,
   },
   lennardJones: { value: potential, source: 'Svehla 1962', where: 'table I(a)' },

@@ -4,9 +4,9 @@ import type { Species } from './species';
 /** The critical volume, m³/mol, is of Poling, Prausnitz & O’Connell 2001, appendix A; from memory. */
 const critical = { temperature: 591.75, volume: 316e-6, acentric: 0.264 };
 
-export const toluene: Species = {
-  formula: 'toluene',
-  names: ['methylbenzene'],
+export const C7H8: Species = {
+  formula: 'C7H8',
+  names: ['toluene', 'methylbenzene'],
   molarMass: { value: 92.141e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 2e-4 },
   viscosity: {
     value: chungViscosity(critical, 92.141e-3, { low: 200, high: 1500 }),
@@ -31,7 +31,7 @@ export const toluene: Species = {
       ],
     },
     source: 'McBride 2002',
-    where: 'table 1, methylbenzene, 200 to 6000 K',
+    where: 'table 1, toluene, 200 to 6000 K',
     uncertainty: 0.01,
   },
   lennardJones: { value: chungPotential(critical), source: 'Chung 1988', where: 'σ and ε/k from the critical point' },

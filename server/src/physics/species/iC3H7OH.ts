@@ -3,9 +3,9 @@ import type { Species } from './species';
 
 const potential = { diameter: 4.64e-10, wellDepth: 518 };
 
-export const isopropanol: Species = {
-  formula: 'isopropanol',
-  names: ['2-propanol', 'isopropyl alcohol'],
+export const iC3H7OH: Species = {
+  formula: 'iC3H7OH',
+  names: ['isopropanol', 'isopropyl alcohol'],
   molarMass: { value: 60.096e-3, source: 'CIAAW 2021', where: 'abridged standard atomic weights', uncertainty: 2e-4 },
   viscosity: {
     value: viscosityOfPotential(potential, 60.096e-3, { low: 200, high: 1500 }, 0.2),
