@@ -11,6 +11,7 @@ import { noValue } from './problems/noValue';
 import { unknownName } from './problems/unknownName';
 import { wrongArguments } from './problems/wrongArguments';
 import { wrongType } from './problems/wrongType';
+import { show } from './quantity';
 import type { Scope } from './scope';
 import { interpolate } from './table';
 import type { Quantity } from './values';
@@ -32,7 +33,7 @@ function evaluateFunction(node: Call, definition: FunctionDefinition, scope: Sco
   }
   if (!argumentsFit(node, definition, values, scope)) return undefined;
   const result = definition.compute(first, ...rest);
-  if (!result) scope.report(noValue.at(node.span, { why: `${definition.name} has no value there` }));
+  if (!result) scope.report(noValue.at(node.span, { why: `${definition.name} has no value at ${show(first)}` }));
   return result;
 }
 

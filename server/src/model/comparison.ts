@@ -34,9 +34,9 @@ export function evaluateComparison(node: Comparison, scope: Scope): Verdict | un
     case '>=':
       return verdict(node, subtract(left, right), right, shown, { strict: node.operator === '>' });
     case '==':
-      return plain(node, left.si === right.si, shown);
+      return equality(node, left, right, shown);
     case '!=':
-      return plain(node, left.si !== right.si, shown);
+      return not(equality(node, left, right, shown));
   }
 }
 
@@ -135,13 +135,32 @@ function evaluateAlike(nodes: readonly Expression[], scope: Scope): readonly Qua
   return known.length === nodes.length ? known : undefined;
 }
 
+/** Equal within rounding. Where the difference is uncertain and reaches zero, nobody can tell. */
+function equality(node: Expression, left: Quantity, right: Quantity, sides: readonly Side[]): Verdict {
+  const difference = settled(subtract(left, right), [left, right]);
+  const equal = difference.si === 0;
+  const width = halfWidth(difference.leans);
+  const open = width > 0 && width >= Math.abs(difference.si);
+  return { ...plain(node, equal, sides), ...(open ? { status: 'undecided' } : {}), leans: difference.leans };
+}
+
+/** What is left between two sides by rounding alone is no difference. */
+function settled(room: Quantity, sides: readonly Quantity[]): Quantity {
+  const scale = Math.max(...sides.map(({ si }) => Math.abs(si)));
+  return Math.abs(room.si) <= 1e-12 * scale ? { ...room, si: 0 } : room;
+}
+
 function verdict(
   node: Expression,
-  room: Quantity,
+  distance: Quantity,
   limit: Quantity,
   sides: readonly Side[],
   { strict }: { strict: boolean },
 ): Verdict {
+  const room = settled(
+    distance,
+    sides.flatMap(({ value }) => value ?? []),
+  );
   const holds = strict ? room.si > 0 : room.si >= 0;
   const uncertain = halfWidth(room.leans) > Math.abs(room.si);
   const status = uncertain ? 'undecided' : holds ? 'holds' : 'fails';

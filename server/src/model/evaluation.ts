@@ -7,7 +7,7 @@ import type { Declared } from './declare';
 import type { Document, Read } from './document';
 import { evaluateDeclaration } from './evaluateDeclaration';
 import type { Evaluated, Outcome } from './evaluated';
-import { failed, sameOutcome } from './evaluated';
+import { blocked, failed, sameOutcome } from './evaluated';
 import { builtInGas, gasNames } from './mixture';
 import type { Problem } from './problems/problem';
 import type { DeclarationScope, Lookup } from './scope';
@@ -104,7 +104,9 @@ export function createEvaluation(sight: Sight): Evaluation {
       reads.set(key, { key, seen });
       return seen;
     };
-    const { outcome, problems } = evaluateDeclaration(declared.item, (report) => scopeOf(place, read, report));
+    const { outcome: own, problems } = evaluateDeclaration(declared.item, (report) => scopeOf(place, read, report));
+    // What rests on a condition that is assumed without a value has no value either, not that of the default.
+    const outcome = own.kind === 'value' && [...reads.values()].some(lacksCondition) ? blocked : own;
     const before = document.memo.get(declared.id)?.outcome;
     const kept = before && sameOutcome(before, outcome) ? before : outcome;
     const entry = { text: declared.item.text, reads: [...reads.values()], outcome: kept, problems };
@@ -173,6 +175,10 @@ export function createEvaluation(sight: Sight): Evaluation {
 }
 
 type ReadSort = 'name' | 'names' | 'assume' | 'file' | 'display';
+function lacksCondition({ key, seen }: Read): boolean {
+  return key.startsWith('assume:') && seen !== undefined && (seen as Outcome).kind !== 'value';
+}
+
 type ReadKey = `${ReadSort}:${string}`;
 
 function splitKey(key: string): [ReadSort, string] {

@@ -54,7 +54,7 @@ export function dataTitle(data: DataKind): string {
 export function citation(id: SourceId): string {
   const source: { authors: string; title: string; year: number; published: string; doi?: string } = sources[id];
   const { authors, title, year, published, doi } = source;
-  return `${authors} (${year}): ${title}. ${published}${doi ? `, doi:${doi}` : ''}`;
+  return `${authors} (${year}): ${title.replace(/\.$/, '')}. ${published}${doi ? `, doi:${doi}` : ''}`;
 }
 
 /** `numberDensity`, `mean_free_path` → `number density`, `mean free path` */

@@ -47,7 +47,7 @@ export function describeVerdict(verdict: Verdict, condition: Expression, text: s
   const value = left?.value ? showWithTolerance(left.value, { display }) : (left?.text ?? '');
   const limits = rest.flatMap((side) => (side.value ? [showWithTolerance(side.value, { display })] : []));
   const explained = limits.length > 0 && namesSomething(relation, first) ? ` (${limits.join(', ')})` : '';
-  const is = subject === value ? '' : `${subject} is `;
+  const is = first.kind === 'number' ? '' : `${subject} is `;
   const not = verdict.negated ? 'not ' : '';
   return `${is}${value}; wanted ${not}${wanted}${explained}`;
 }

@@ -6,6 +6,7 @@ import { evaluate, evaluateQuantity } from './expression';
 import { offsetLiteral, readLiteral } from './literal';
 import { mismatch } from './mismatch';
 import { ambiguousTemperature } from './problems/ambiguousTemperature';
+import { missingUnit } from './problems/missingUnit';
 import { outOfBounds } from './problems/outOfBounds';
 import { replacement } from './problems/problem';
 import { wrongType } from './problems/wrongType';
@@ -67,6 +68,14 @@ function halfWidthOf(node: Tolerance, value: Quantity, width: Quantity, scope: S
   if (relative) return Math.abs(value.si) * width.si;
   if (width.dimension === value.dimension) return width.si;
   const { dimension } = value;
+  const unit = width.unit?.text;
+  if (node.value.kind === 'number' && !node.value.unit && unit !== undefined) {
+    // `100 ± 4 Pa` is how data sheets write it.
+    const { span, text } = node.value;
+    const wants = describeDimension(width.dimension);
+    scope.report(missingUnit.at(span, { subject: 'the half-width', wants, digits: text, units: [unit] }));
+    return undefined;
+  }
   mismatch(node.halfWidth, width, { subject: 'the half-width', dimension, wants: describeDimension(dimension) }, scope);
   return undefined;
 }
