@@ -1,5 +1,17 @@
 import assert from 'node:assert/strict';
-import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { spawnSync } from 'node:child_process';
+import {
+  chmodSync,
+  lstatSync,
+  mkdirSync,
+  mkdtempSync,
+  readdirSync,
+  readFileSync,
+  rmSync,
+  statSync,
+  symlinkSync,
+  writeFileSync,
+} from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
 import { tenuity } from './tenuity';
@@ -33,7 +45,7 @@ describe('tenuity check', () => {
     const { code, out, err } = tenuity(['check', held]);
     assert.equal(code, 0);
     assert.equal(err, '');
-    assert.match(out, /1 file; 1 requirement: 1 hold, 0 fail, 0 undecided; 0 errors, 0 warnings\n$/);
+    assert.match(out, /^1 file; 1 requirement: 1 holds; no errors, no warnings\n$/m);
   });
 
   it('exits with 1 when a requirement fails', () => {
@@ -55,7 +67,7 @@ describe('tenuity check', () => {
   });
 
   it('shows every result with its method when asked', () => {
-    const { out } = tenuity(['check', '--all-values', '-'], {
+    const { out } = tenuity(['check', '--values=all', '-'], {
       input: 'state a of He { pressure = 1 Pa, temperature = 300 K }\n',
     });
     assert.match(out, /mean_free_path_hard_sphere +\S+ .*hard spheres/);
@@ -94,7 +106,10 @@ describe('tenuity check', () => {
   for (const [title, args, message] of [
     ['an unknown option', ['check', '--vales', 'x.gas'], /no option --vales; did you mean --values\?/],
     ['an unknown command', ['chek', 'x.gas'], /no command “chek”; did you mean check\?/],
-    ['an unknown format', ['check', '--format', 'xml', '-'], /--format is text or json/],
+    ['an unknown format', ['check', '--format', 'xml', '-'], /--format is text or json, not “xml”/],
+    ['an unknown measure of values', ['check', '--values=most', '-'], /--values is all, not “most”/],
+    ['an option that lacks its value', ['check', '--format'], /--format needs a value/],
+    ['a flag with a value', ['check', '--strict=1', '-'], /--strict takes no value/],
     ['no file', ['check'], /no file is named/],
     ['a file that is not there', ['check', 'nowhere.gas'], /nowhere\.gas: there is no such file/],
     ['a folder without a file', ['check', 'test/cli/expected'], /holds no gas-state file/],
@@ -111,6 +126,81 @@ describe('tenuity check', () => {
     const { code, err } = tenuity(['check', file('binary.gas', Buffer.from([1, 0, 2]))]);
     assert.equal(code, 2);
     assert.match(err, /is not a text/);
+  });
+
+  it('exits with 2 for a text in another encoding than UTF-8', () => {
+    const { code, err } = tenuity(['check', file('latin.gas', Buffer.from('let a = 1 \u00B0C\n', 'latin1'))]);
+    assert.equal(code, 2);
+    assert.match(err, /is not a text in UTF-8/);
+  });
+
+  it('passes over a folder that is named like a file', () => {
+    const inside = mkdtempSync(path.join(folder, 'records-'));
+    mkdirSync(path.join(inside, 'folder.gas'));
+    writeFileSync(path.join(inside, 'one.gas'), 'let a = 1 mm\n');
+    assert.equal(tenuity(['check', inside]).code, 0);
+  });
+
+  it('takes what looks like an option for a file behind --', () => {
+    const { code, err } = tenuity(['check', '--', '--strict']);
+    assert.equal(code, 2);
+    assert.match(err, /--strict: there is no such file/);
+  });
+
+  it('lists a used file whose fault leaves a name without a value, and exits with 1', () => {
+    file('faulty.gas', 'let gap = 3 mmm\n');
+    const user = file('relies.gas', 'use "faulty.gas"\nrequire gap > 1 mm\n');
+    const { code, out } = tenuity(['check', user]);
+    assert.equal(code, 1);
+    assert.match(out, /undecided +line 2 +require gap > 1 mm\n +cannot be judged/);
+    assert.match(out, /faulty\.gas:1:13: error: .*\[unknown-unit\]/);
+    assert.match(out, /^2 files; /m);
+  });
+
+  it('does not pass a requirement on what is not computed', () => {
+    const input = 'line l = t\ntube t { bore = 1 mm, length = 1 m }\nrequire l.conductance > 1 L/s\n';
+    const { code, out } = tenuity(['check', '-'], { input });
+    assert.equal(code, 1);
+    assert.match(out, /cannot be judged/);
+  });
+
+  it('lets no text of a file drive the terminal', () => {
+    const { out } = tenuity(['check', '-'], { input: 'require 1 mm > 2 mm because "\u001B[2J\u202E\u0007"\n' });
+    // eslint-disable-next-line no-control-regex
+    assert.doesNotMatch(out, /[\u0000-\u0009\u000B-\u001F\u007F-\u009F\u202E]/);
+  });
+
+  it('shows of a line that no terminal holds what is around the place', () => {
+    const input = `let a = ${'1 mm + '.repeat(100)}2 qq + ${'1 mm + '.repeat(100)}1 mm\n`;
+    const lines = tenuity(['check', '-'], { input }).out.split('\n');
+    assert.ok(Math.max(...lines.map((line) => line.length)) < 140);
+    const [line = '', mark = ''] = lines.slice(lines.findIndex((each) => each.includes('…')));
+    assert.equal(line.slice(mark.indexOf('^'), mark.lastIndexOf('^') + 1), 'qq');
+  });
+
+  it('lists problems in the order of their places', () => {
+    const { out } = tenuity(['check', '-'], { input: 'require a.\nlet b = 2 qq + 3 qqq\n' });
+    const places = [...out.matchAll(/^-:(\d+):(\d+):/gm)].map(
+      ([, line, column]) => Number(line) * 1000 + Number(column),
+    );
+    assert.ok(places.length > 2);
+    assert.deepEqual(
+      places,
+      [...places].sort((a, b) => a - b),
+    );
+  });
+
+  it('ends quietly when its reader has seen enough', () => {
+    const many = file('many.gas', 'let a = 1 qq\n'.repeat(5000));
+    const { stderr } = spawnSync('sh', ['-c', `"${process.execPath}" dist/cli.js check "${many}" | head -n 1`], {
+      encoding: 'utf8',
+    });
+    assert.equal(stderr, '');
+  });
+
+  it('says the same twice', () => {
+    const args = ['check', '--values=all', '--format', 'json', 'samples'];
+    assert.equal(tenuity(args).out, tenuity(args).out);
   });
 
   it('takes an empty file and one with a byte order mark', () => {
@@ -155,6 +245,8 @@ describe('tenuity explain', () => {
     ['unit-mismatch', /measures something else/],
     ['mean_free_path', /viscosity/],
     ['mbar', /unit of pressure/],
+    ['°C', /0 °C is 273\.15/],
+    ['Ω', /ohm/],
     ['N2', /nitrogen[\s\S]*safety data sheet/],
     ['tube', /bore = 40 mm/],
     ['bore', /inner diameter/],
@@ -191,6 +283,27 @@ describe('tenuity format', () => {
     assert.equal(tenuity(['format', full]).code, 0);
     assert.equal(readFileSync(full, 'utf8'), neat);
     assert.equal(tenuity(['format', '--check', full]).code, 0);
+  });
+
+  it('keeps the byte order mark, the permissions and a link, and leaves nothing beside the file', () => {
+    const inside = mkdtempSync(path.join(folder, 'kept-'));
+    const [full, link] = [path.join(inside, 'marked.gas'), path.join(inside, 'link.gas')];
+    writeFileSync(full, `\uFEFF${rough}`);
+    chmodSync(full, 0o660);
+    symlinkSync('marked.gas', link);
+    assert.equal(tenuity(['format', link]).code, 0);
+    assert.equal(readFileSync(full, 'utf8'), `\uFEFF${neat}`);
+    assert.equal(statSync(full).mode & 0o777, 0o660);
+    assert.ok(lstatSync(link).isSymbolicLink());
+    assert.deepEqual(readdirSync(inside).sort(), ['link.gas', 'marked.gas']);
+  });
+
+  it('does not touch a text in another encoding than UTF-8', () => {
+    const full = path.join(folder, 'latin.gas');
+    const bytes = Buffer.from('let   a=1 mm # 5 \u00B0C\n', 'latin1');
+    writeFileSync(full, bytes);
+    assert.equal(tenuity(['format', full]).code, 2);
+    assert.deepEqual(readFileSync(full), bytes);
   });
 
   it('writes the standard input to the standard output', () => {

@@ -6,9 +6,10 @@ import { requirementsOf } from '../report/requirements';
 import type { TextOptions } from '../report/text';
 import { textFile, textSummary } from '../report/text';
 import type { Command } from './command';
-import { readArguments, UsageError } from './command';
+import { readArguments } from './command';
 import { emphasisFor } from './emphasis';
-import { filesAround, namedFiles } from './files';
+import type { NamedFile } from './files';
+import { filesAround, namedFiles, nameOf } from './files';
 import { VERSION } from './version';
 
 export const check: Command = {
@@ -19,52 +20,73 @@ export const check: Command = {
 Evaluates gas-state files and lists their problems and requirements. A folder means the files below it, - the standard input.
 
   --values               show the record as well: the main figures of every declaration
-  --all-values           show every result with its method
+  --values=all           show every result with its method
   --format text|json     how to print (default text)
   --strict               warnings fail too
   --stdin-filename NAME  the name that the standard input goes by
 
-Exit codes: 0 all requirements hold, 1 something fails, 2 bad usage or an unreadable file.
+A file that is used by one of them is listed as well when something in it has no value.
+
+Exit codes: 0 nothing fails, 1 an error, or a requirement that fails or has no value, 2 bad usage or an unreadable file.
 
   tenuity check samples/load-lock.gas
   tenuity check --strict --format json records/ > checked.json`,
   run: async (args) => {
     const given = readArguments(args, {
-      values: { type: 'boolean' },
-      'all-values': { type: 'boolean' },
-      format: { type: 'string' },
+      values: { type: 'boolean', words: ['all'] },
+      format: { type: 'string', words: ['text', 'json'] },
       strict: { type: 'boolean' },
       'stdin-filename': { type: 'string' },
     });
-    const format = given.text('format') ?? 'text';
-    if (format !== 'text' && format !== 'json') throw new UsageError(`--format is text or json, not “${format}”`);
-    const named = namedFiles(given.files, { stdinName: given.text('stdin-filename') });
-    const workspace = createWorkspace(filesAround(named));
-    const checked = named.map(({ name, uri }) => ({ name, analysis: workspace.analyse(uri) }));
-    const analyses = checked.map(({ analysis }) => analysis);
-    if (format === 'json') {
-      const report: JsonReport = {
-        tenuity: VERSION,
-        files: checked.map(({ name, analysis }) => jsonFile(name, analysis)),
-      };
+    const checked = checkedFiles(namedFiles(given.files, { stdinName: given.text('stdin-filename') }));
+    if (given.text('format') === 'json') {
+      const files = checked.map(({ name, analysis }) => jsonFile(name, analysis));
+      const report: JsonReport = { tenuity: VERSION, files };
       process.stdout.write(`${JSON.stringify(report, null, 2)}\n`);
     } else {
-      const values = given.flag('all-values') ? 'all' : given.flag('values') ? 'main' : 'none';
-      const options: TextOptions = { values, emphasis: emphasisFor(process.stdout) };
-      const texts = checked
-        .map(({ name, analysis }) => textFile(name, analysis, options))
-        .filter((text) => text !== '');
-      process.stdout.write(`${[...texts, textSummary(analyses)].join('\n')}\n`);
+      const values = given.text('values') === 'all' ? 'all' : given.flag('values') ? 'main' : 'none';
+      process.stdout.write(textReport(checked, { values, emphasis: emphasisFor(process.stdout) }));
     }
-    return Promise.resolve(analyses.some((analysis) => fails(analysis, { strict: given.flag('strict') })) ? 1 : 0);
+    const strict = given.flag('strict');
+    return Promise.resolve(checked.some(({ analysis }) => fails(analysis, { strict })) ? 1 : 0);
   },
 };
 
-/** An error, or a requirement that fails; when strict also a warning. A preference that is not met is a warning. */
+interface Checked {
+  readonly name: string;
+  readonly analysis: Analysis;
+}
+
+/** The named files, and behind them each file used by them whose faults could leave a name without a value. */
+function checkedFiles(named: readonly NamedFile[]): readonly Checked[] {
+  const workspace = createWorkspace(filesAround(named));
+  const checked = new Map(named.map(({ name, uri }) => [uri, { name, analysis: workspace.analyse(uri) }]));
+  const seen = new Set(checked.keys());
+  const waiting = [...checked.values()].map(({ analysis }) => analysis);
+  for (let analysis = waiting.shift(); analysis; analysis = waiting.shift()) {
+    for (const { uri } of analysis.uses) {
+      if (seen.has(uri)) continue;
+      seen.add(uri);
+      const used = workspace.analyse(uri);
+      waiting.push(used);
+      if (used.declared.some((declared) => used.outcome(declared).kind === 'failed'))
+        checked.set(uri, { name: nameOf(uri), analysis: used });
+    }
+  }
+  return [...checked.values()];
+}
+
+function textReport(checked: readonly Checked[], options: TextOptions): string {
+  const texts = checked.map(({ name, analysis }) => textFile(name, analysis, options));
+  const summary = textSummary(checked.map(({ analysis }) => analysis));
+  return `${[...texts.filter((text) => text !== ''), summary].join('\n')}\n`;
+}
+
+/** An error, or a requirement that fails or has no value; when strict also a warning. A preference that is not met is one. */
 function fails(analysis: Analysis, { strict }: { readonly strict: boolean }): boolean {
-  const failing = requirementsOf(analysis).some(({ status, strength }) => status === 'fails' && strength === 'require');
+  const required = requirementsOf(analysis).filter(({ strength }) => strength === 'require');
   return (
-    failing ||
+    required.some(({ status, evaluated }) => status === 'fails' || !evaluated) ||
     analysis
       .problems()
       .some(({ problem }) => problem.severity === 'error' || (strict && problem.severity === 'warning'))

@@ -1,4 +1,5 @@
 import { parseArgs } from 'node:util';
+import { either } from '../model/problems/problem';
 import { nearestNames } from '../quantities/nearestNames';
 
 /** A command of the command line. */
@@ -15,12 +16,18 @@ export interface Command {
 export class UsageError extends Error {}
 
 export interface Options {
-  readonly [name: string]: { readonly type: 'boolean' | 'string'; readonly short?: string };
+  readonly [name: string]: {
+    readonly type: 'boolean' | 'string';
+    /** The values it may have. A flag with words may stand alone as well. */
+    readonly words?: readonly string[];
+  };
 }
 
 export interface Arguments {
   readonly files: readonly string[];
+  /** Whether it is given without a value. */
   flag(name: string): boolean;
+  /** The value it is given. */
   text(name: string): string | undefined;
 }
 
@@ -42,8 +49,12 @@ export function readArguments(args: readonly string[], options: Options): Argume
         `there is no option ${token.rawName}${nearest === undefined ? '' : `; did you mean --${nearest}?`}`,
       );
     }
-    if (known.type === 'string' && token.value === undefined) throw new UsageError(`${token.rawName} needs a value`);
-    if (known.type === 'boolean' && token.value !== undefined) throw new UsageError(`${token.rawName} takes no value`);
+    const { type, words } = known;
+    if (type === 'string' && token.value === undefined) throw new UsageError(`${token.rawName} needs a value`);
+    if (token.value === undefined) continue;
+    if (type === 'boolean' && !words) throw new UsageError(`${token.rawName} takes no value`);
+    if (words && !words.includes(token.value))
+      throw new UsageError(`${token.rawName} is ${either(words)}, not “${token.value}”`);
   }
   return {
     files: positionals,

@@ -1,4 +1,3 @@
-import { startNodeServer } from '../lsp/nodeServer';
 import type { Command } from './command';
 import { readArguments, UsageError } from './command';
 
@@ -14,6 +13,8 @@ Speaks the Language Server Protocol over standard input and output, for any edit
   run: async (args) => {
     if (!readArguments(args, { stdio: { type: 'boolean' } }).flag('stdio'))
       throw new UsageError('write tenuity serve --stdio');
+    // The other commands need no protocol, and start sooner without it.
+    const { startNodeServer } = await import('../lsp/nodeServer');
     startNodeServer();
     // The server ends the process when its client says so or goes.
     return new Promise<never>(() => undefined);

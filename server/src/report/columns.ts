@@ -1,3 +1,5 @@
+import { printable } from './printable';
+
 interface AlignOptions {
   readonly indent: number;
   /** Sets a padded cell off, without changing its width. */
@@ -5,7 +7,8 @@ interface AlignOptions {
 }
 
 /** Rows of cells in columns, each as wide as its widest cell. */
-export function aligned(rows: readonly (readonly string[])[], { indent, style }: AlignOptions): string {
+export function aligned(given: readonly (readonly string[])[], { indent, style }: AlignOptions): string {
+  const rows = given.map((row) => row.map(printable));
   const widths: number[] = [];
   for (const row of rows)
     row.forEach((cell, column) => (widths[column] = Math.max(widths[column] ?? 0, columnsOf(cell))));
@@ -22,7 +25,12 @@ export function aligned(rows: readonly (readonly string[])[], { indent, style }:
     .join('\n');
 }
 
-/** How many columns a text takes: combining marks, as in c̄, take none. */
+/** How many columns a text takes in a terminal: combining marks, as in c̄, take none; Chinese, Japanese and Korean signs two. */
 export function columnsOf(text: string): number {
-  return Array.from(text.replace(/\p{Mn}/gu, '')).length;
+  const letters = text.replace(WITHOUT_WIDTH, '');
+  return Array.from(letters).length + (letters.match(WIDE)?.length ?? 0);
 }
+
+const WITHOUT_WIDTH = /[\p{Mn}\p{Me}\p{Cf}]/gu;
+const WIDE =
+  /[\p{Script=Han}\p{Script=Hiragana}\p{Script=Katakana}\p{Script=Hangul}\u3000-\u303E\uFF01-\uFF60\p{Emoji_Presentation}]/gu;

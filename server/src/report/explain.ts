@@ -1,9 +1,7 @@
 import { nearestNames } from '../quantities/nearestNames';
 import { parseUnit } from '../quantities/parseUnit';
-import { describeUnit, kindNamed, quantityKinds } from '../quantities/quantityKinds';
+import { kindNamed, quantityKinds } from '../quantities/quantityKinds';
 import { units } from '../quantities/units';
-import { coherentUnitText } from '../quantities/dimension';
-import { formatNumber } from '../quantities/format';
 import { conditions } from '../model/conditions';
 import { functions } from '../model/functions';
 import { kinds } from '../model/kinds/list';
@@ -11,7 +9,9 @@ import { statements } from '../model/kinds/statements';
 import { builtInGas, gasNames } from '../model/mixture';
 import { problemKinds } from '../model/problems/list';
 import { results } from '../model/results';
+import { kindMeant } from '../features/describe/describeUnits';
 import { hoverSpecies } from '../features/hover/hoverGas';
+import { inSI } from '../features/hover/hoverUnit';
 
 /** A sort of thing that can be explained: its names, and what there is to say of one. */
 interface Shelf {
@@ -22,7 +22,7 @@ interface Shelf {
 
 const shelves: readonly Shelf[] = [
   {
-    sort: 'problem',
+    sort: 'a problem',
     names: problemKinds.map(({ code }) => code),
     explain: (name) => {
       const found = problemKinds.find(({ code }) => code === name);
@@ -30,7 +30,7 @@ const shelves: readonly Shelf[] = [
     },
   },
   {
-    sort: 'kind of declaration',
+    sort: 'a kind of declaration',
     names: [...kinds, ...statements].map(({ word }) => word),
     explain: (name) => {
       const kind = kinds.find(({ word }) => word === name);
@@ -40,7 +40,7 @@ const shelves: readonly Shelf[] = [
     },
   },
   {
-    sort: 'gas',
+    sort: 'a gas',
     names: gasNames,
     explain: (name) => {
       const [species] = builtInGas(name)?.composition.species ?? [];
@@ -48,7 +48,7 @@ const shelves: readonly Shelf[] = [
     },
   },
   {
-    sort: 'result',
+    sort: 'a result',
     names: results.map(({ name }) => name),
     explain: (name) => {
       const found = results.find((result) => result.name === name);
@@ -60,7 +60,7 @@ const shelves: readonly Shelf[] = [
     },
   },
   {
-    sort: 'input',
+    sort: 'an input',
     names: kinds.flatMap(({ keys }) => keys.map(({ name }) => name)),
     explain: (name) =>
       kinds
@@ -72,7 +72,7 @@ const shelves: readonly Shelf[] = [
         .join('\n'),
   },
   {
-    sort: 'function',
+    sort: 'a function',
     names: functions.map(({ name }) => name),
     explain: (name) => {
       const found = functions.find((each) => each.name === name);
@@ -80,7 +80,7 @@ const shelves: readonly Shelf[] = [
     },
   },
   {
-    sort: 'reference condition',
+    sort: 'a reference condition',
     names: conditions.map(({ name }) => name),
     explain: (name) => {
       const found = conditions.find((each) => each.name === name);
@@ -88,7 +88,7 @@ const shelves: readonly Shelf[] = [
     },
   },
   {
-    sort: 'kind of quantity',
+    sort: 'a kind of quantity',
     names: quantityKinds.map(({ name }) => name),
     explain: (name) => {
       const found = kindNamed(name);
@@ -96,17 +96,17 @@ const shelves: readonly Shelf[] = [
     },
   },
   {
-    sort: 'unit',
+    sort: 'a unit',
     names: units.flatMap(({ symbol, aliases }) => [symbol, ...aliases]),
     explain: (name) => {
       const parsed = parseUnit(name);
       if (!parsed.ok) return undefined;
       const { unit } = parsed;
+      const kind = kindMeant(unit);
       const meanings = unit.parts.map(({ row }) => `${row.symbol}: ${row.meaning} (${row.source})`);
-      return [
-        `A unit of ${describeUnit(unit).replace(/^an? /, '')}: ${formatNumber(unit.factor, 10)} ${coherentUnitText(unit.dimension)}.`,
-        ...new Set(meanings),
-      ].join('\n');
+      return [...(kind ? [`A unit of ${kind.title.toLowerCase()}.`] : []), inSI(unit, {}), ...new Set(meanings)].join(
+        '\n',
+      );
     },
   },
 ];
@@ -115,7 +115,7 @@ const shelves: readonly Shelf[] = [
 export function explain(topic: string): { readonly text: string } | { readonly nearest: readonly string[] } {
   const found = shelves.flatMap(({ sort, explain: look }) => {
     const text = look(topic);
-    return text ? [`${topic}, a ${sort}\n\n${text}`] : [];
+    return text ? [`${topic}, ${sort}\n\n${text}`] : [];
   });
   return found.length > 0
     ? { text: found.join('\n\n') }

@@ -6,6 +6,7 @@ import type { Figure, Members, Provenance, Quantity, Value, Word } from '../mode
 import { coherentUnitText } from '../quantities/dimension';
 import { lineIndex } from '../features/lines';
 import type { Position } from '../features/lines';
+import { problemsOf } from './problems';
 import { requirementsOf } from './requirements';
 
 /** What `check --format json` prints; check.schema.json states it for other programs. */
@@ -80,19 +81,15 @@ export function jsonFile(file: string, analysis: Analysis): JsonFile {
       status,
       margin: margin ?? null,
     })),
-    diagnostics: analysis.problems().map(({ problem: { code, severity, message, span }, offset }) => {
-      const start = lines.positionAt(offset + span.start);
-      const end = lines.positionAt(offset + span.end);
-      return {
-        code,
-        severity,
-        line: start.line + 1,
-        column: start.character + 1,
-        endLine: end.line + 1,
-        endColumn: end.character + 1,
-        message,
-      };
-    }),
+    diagnostics: problemsOf(analysis).map(({ problem: { code, severity, message }, start, end }) => ({
+      code,
+      severity,
+      line: start.line + 1,
+      column: start.character + 1,
+      endLine: end.line + 1,
+      endColumn: end.character + 1,
+      message,
+    })),
   };
 }
 

@@ -9,6 +9,8 @@ export interface RequirementRow {
   readonly strength: 'require' | 'prefer';
   readonly because?: string;
   readonly status: 'holds' | 'fails' | 'undecided';
+  /** Whether it could be judged at all; if so, only the tolerances can leave it undecided. */
+  readonly evaluated: boolean;
   readonly margin?: number;
 }
 
@@ -27,6 +29,7 @@ export function requirementsOf(analysis: Analysis): readonly RequirementRow[] {
         strength,
         ...(because?.kind === 'text' ? { because: because.text } : {}),
         status: verdict?.status ?? 'undecided',
+        evaluated: verdict !== undefined,
         ...(verdict?.margin === undefined ? {} : { margin: verdict.margin }),
       },
     ];

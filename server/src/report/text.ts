@@ -1,12 +1,16 @@
-import type { Analysis, LocatedProblem } from '../model/analysis';
+import type { Analysis } from '../model/analysis';
 import type { Declared } from '../model/declare';
 import type { Severity } from '../model/problems/problem';
 import { describeRecord, showing } from '../features/describe/describe';
 import { describePercent } from '../features/describe/describePercent';
 import { describeShortly } from '../features/describe/describeShortly';
-import type { LineIndex } from '../features/lines';
 import { lineIndex } from '../features/lines';
-import { aligned, columnsOf } from './columns';
+import { aligned } from './columns';
+import { excerpt } from './excerpt';
+import { printable } from './printable';
+import type { PlacedProblem } from './problems';
+import { problemsOf } from './problems';
+import type { RequirementRow } from './requirements';
 import { requirementsOf } from './requirements';
 
 /** How words are set off on a terminal; on paper not at all. */
@@ -39,23 +43,39 @@ export function textFile(file: string, analysis: Analysis, options: TextOptions)
     problemSection(file, analysis, emphasis),
   ];
   const shown = sections.filter((section) => section !== '');
-  return shown.length === 0 ? '' : `${[emphasis.strong(file), ...shown].join('\n\n')}\n`;
+  return shown.length === 0 ? '' : `${[emphasis.strong(printable(file)), ...shown].join('\n\n')}\n`;
 }
 
 /** The closing line over all files. */
 export function textSummary(analyses: readonly Analysis[]): string {
-  const problems = analyses.flatMap((analysis) => analysis.problems().map(({ problem }) => problem.severity));
-  const statuses = analyses.flatMap((analysis) => requirementsOf(analysis).map(({ status }) => status));
-  const of = <T>(all: readonly T[], one: T) => all.filter((each) => each === one).length;
+  const severities = analyses.flatMap((analysis) => analysis.problems().map(({ problem }) => problem.severity));
+  const verdicts = analyses.flatMap((analysis) => requirementsOf(analysis).map(verdictOf));
+  const met = VERDICTS.flatMap((verdict) => {
+    const count = of(verdicts, verdict);
+    const word = count === 1 ? verdict : (MANY[verdict] ?? verdict);
+    return count === 0 ? [] : [`${count} ${word}`];
+  });
   const requirements =
-    statuses.length === 0
-      ? 'no requirements'
-      : `${counted(statuses.length, 'requirement')}: ${of(statuses, 'holds')} hold, ${of(statuses, 'fails')} fail, ${of(statuses, 'undecided')} undecided`;
-  return `${counted(analyses.length, 'file')}; ${requirements}; ${counted(of(problems, 'error'), 'error')}, ${counted(of(problems, 'warning'), 'warning')}`;
+    verdicts.length === 0 ? 'no requirements' : `${counted(verdicts.length, 'requirement')}: ${met.join(', ')}`;
+  const problems = `${counted(of(severities, 'error'), 'error')}, ${counted(of(severities, 'warning'), 'warning')}`;
+  return `${counted(analyses.length, 'file')}; ${requirements}; ${problems}`;
+}
+
+type Verdict = 'holds' | 'fails' | 'not met' | 'undecided';
+const VERDICTS: readonly Verdict[] = ['holds', 'fails', 'not met', 'undecided'];
+const MANY: Readonly<Partial<Record<Verdict, string>>> = { holds: 'hold', fails: 'fail' };
+
+/** A preference does not fail; it is not met. */
+function verdictOf({ status, strength }: RequirementRow): Verdict {
+  return status === 'fails' && strength === 'prefer' ? 'not met' : status;
+}
+
+function of<T>(all: readonly T[], one: T): number {
+  return all.filter((each) => each === one).length;
 }
 
 function counted(count: number, noun: string): string {
-  return `${count} ${noun}${count === 1 ? '' : 's'}`;
+  return `${count === 0 ? 'no' : count} ${noun}${count === 1 ? '' : 's'}`;
 }
 
 function recordSection(analysis: Analysis, { values, emphasis }: TextOptions): string {
@@ -87,62 +107,60 @@ function recordRows(analysis: Analysis, declared: Declared, values: 'main' | 'al
 
 function requirementSection(analysis: Analysis, emphasis: Emphasis): string {
   const lines = lineIndex(analysis.text);
-  const rows = requirementsOf(analysis).flatMap(({ status, margin, text, because, offset, strength }) => [
-    {
-      status,
-      cells: [
-        status,
-        margin === undefined ? '' : `margin ${describePercent(margin)}`,
-        `line ${lines.positionAt(offset).line + 1}`,
-        `${strength} ${text}`,
-      ],
-    },
-    ...(because === undefined ? [] : [{ status: undefined, cells: ['', '', '', because] }]),
-  ]);
+  const rows = requirementsOf(analysis).flatMap((row) => {
+    const { margin, text, because, offset, strength, evaluated } = row;
+    const measured = margin === undefined ? '' : `margin ${describePercent(margin)}`;
+    const line = `line ${lines.positionAt(offset).line + 1}`;
+    const below = [...(because === undefined ? [] : [because]), ...(evaluated ? [] : [UNJUDGED])];
+    return [
+      { verdict: verdictOf(row), cells: [verdictOf(row), measured, line, `${strength} ${text}`] },
+      ...below.map((remark) => ({ verdict: undefined, cells: ['', '', '', remark] })),
+    ];
+  });
   return aligned(
     rows.map(({ cells }) => cells),
     {
       indent: 2,
       style: (cell, column, row) => {
-        const status = rows[row]?.status;
-        if (status === undefined) return emphasis.quiet(cell);
-        return column === 0 ? emphasis.status(cell, status) : cell;
+        const verdict = rows[row]?.verdict;
+        if (verdict === undefined) return emphasis.quiet(cell);
+        return column === 0 ? emphasis.status(cell, verdict === 'not met' ? 'undecided' : verdict) : cell;
       },
     },
   );
 }
 
+const UNJUDGED = 'cannot be judged: something in it has no value';
+
 function problemSection(file: string, analysis: Analysis, emphasis: Emphasis): string {
   const lines = lineIndex(analysis.text);
   // What is merely unused is faded in the editor; in a terminal it would be noise.
-  const told = analysis.problems().filter(({ problem }) => problem.severity !== 'hint');
-  return told.map((problem) => problemText(file, analysis.text, problem, lines, emphasis)).join('\n');
+  const told = problemsOf(analysis).filter(({ problem }) => problem.severity !== 'hint');
+  return told
+    .map((placed) => {
+      const { line } = placed.start;
+      const from = lines.offsetAt({ line, character: 0 });
+      const to = lines.offsetAt({ line, character: Number.MAX_SAFE_INTEGER });
+      return problemText(file, analysis.text.slice(from, to), placed, emphasis);
+    })
+    .join('\n');
 }
 
 /** `lock.gas:9:14: error: … [unit-mismatch]`, the line, the place in it, and what could be done. */
-function problemText(
-  file: string,
-  text: string,
-  { problem, offset }: LocatedProblem,
-  lines: LineIndex,
-  emphasis: Emphasis,
-): string {
-  const start = lines.positionAt(offset + problem.span.start);
-  const end = lines.positionAt(offset + problem.span.end);
-  const from = lines.offsetAt({ line: start.line, character: 0 });
-  const line = text.slice(from).split(/\r\n|\n|\r/, 1)[0] ?? '';
-  const before = columnsOf(line.slice(0, start.character));
-  const width =
-    end.line === start.line
-      ? columnsOf(line.slice(start.character, end.character))
-      : columnsOf(line.slice(start.character));
-  const place = `${file}:${start.line + 1}:${start.character + 1}`;
+function problemText(file: string, whole: string, { problem, start, end }: PlacedProblem, emphasis: Emphasis): string {
+  const { severity, message, code, fixes } = problem;
+  const place = `${printable(file)}:${start.line + 1}:${start.character + 1}`;
+  const { line, indent, width } = excerpt(
+    whole,
+    start.character,
+    end.line === start.line ? end.character : whole.length,
+  );
   const told = [
-    `${place}: ${emphasis.severity(problem.severity, problem.severity)}: ${problem.message} ${emphasis.quiet(`[${problem.code}]`)}`,
-    `    ${line.replaceAll('\t', ' ')}`,
-    `    ${' '.repeat(before)}${emphasis.severity('^'.repeat(Math.max(1, width)), problem.severity)}`,
+    `${place}: ${emphasis.severity(severity, severity)}: ${printable(message)} ${emphasis.quiet(`[${code}]`)}`,
+    `    ${line}`,
+    `    ${' '.repeat(indent)}${emphasis.severity('^'.repeat(width), severity)}`,
   ];
-  if (problem.fixes.length > 0)
-    told.push(`    ${emphasis.quiet(`fixes: ${problem.fixes.map(({ title }) => title).join(' · ')}`)}`);
-  return told.join('\n');
+  const titles = fixes.map(({ title }) => printable(title));
+  if (titles.length > 0) told.push(`    ${emphasis.quiet(`fixes: ${titles.join(' · ')}`)}`);
+  return told.map((each) => each.trimEnd()).join('\n');
 }

@@ -32,7 +32,8 @@ export function referenceOf(unit: Unit, { reference }: HoverPlace['options']): s
   return sentence(`the standard conditions here are ${temperature} and ${pressure}`);
 }
 
-function inSI(unit: Unit, { reference }: HoverPlace['options']): string {
+/** One of a unit in the coherent unit of its kind; of a scale with an offset also where it begins. */
+export function inSI(unit: Unit, { reference }: Pick<HoverPlace['options'], 'reference'>): string {
   const coherent = unitOf(kindMeant(unit)?.unit ?? coherentUnitText(unit.dimension));
   const inCoherent = (si: number) => show(quantity(si, unit.dimension), { unit: coherent, digits: 6 });
   if (unit.text === coherent.text) return 'The coherent SI unit.';
