@@ -397,6 +397,27 @@ export const sources = {
     published: 'J. Am. Chem. Soc. 63, 477',
     doi: '10.1021/ja01847a031',
   },
+  'Muckenfuss & Curtiss 1958': {
+    authors: 'Muckenfuss, C.; Curtiss, C. F.',
+    title: 'Thermal conductivity of multicomponent gas mixtures',
+    year: 1958,
+    published: 'J. Chem. Phys. 29, 1273',
+    doi: '10.1063/1.1744707',
+  },
+  'Hirschfelder 1957': {
+    authors: 'Hirschfelder, J. O.',
+    title: 'Heat conductivity in polyatomic or electronically excited gases. II',
+    year: 1957,
+    published: 'J. Chem. Phys. 26, 282',
+    doi: '10.1063/1.1743285',
+  },
+  'Fuller 1966': {
+    authors: 'Fuller, E. N.; Schettler, P. D.; Giddings, J. C.',
+    title: 'New method for prediction of binary gas-phase diffusion coefficients',
+    year: 1966,
+    published: 'Ind. Eng. Chem. 58, 18',
+    doi: '10.1021/ie50677a007',
+  },
   'CLP 2008': {
     authors: 'European Parliament and Council',
     title: 'Regulation (EC) No 1272/2008 on classification, labelling and packaging of substances and mixtures',

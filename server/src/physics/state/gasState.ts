@@ -1,20 +1,13 @@
-import type { Composition } from '../composition';
 import { meanMolarMass } from '../composition';
 import { N_A } from '../constants';
 import type { Outcome } from '../outcome';
-import { all, failure, map, map2 } from '../outcome';
-import type { LennardJones } from '../species/species';
+import { all, failure, map } from '../outcome';
 import { secondVirial } from '../thermo/virial';
-import { mixtureConductivity } from '../transport/conductivity';
-import { diffusionInMixture, isMeasured, pairDiffusion, selfDiffusivity } from '../transport/diffusion';
-import { mixtureViscosity } from '../transport/mixtureViscosity';
-import type { Pairs } from '../transport/pairs';
-import { pairsOf } from '../transport/pairs';
 import type { StatePoint } from './closure';
 import type { StateRequest, Trial } from './request';
-import { factor } from './request';
 import type { SpeciesAlone } from './speciesAlone';
 import { speciesAlone, virialOnTrial } from './speciesAlone';
+import { transportOf } from './transport';
 
 /** The material data of a gas at one state, each worked out once, from which every figure follows. */
 export interface GasState {
@@ -47,34 +40,22 @@ export function gasState(request: StateRequest, trial: Trial): GasState {
   const { composition, point } = request;
   const x = composition.moleFractions;
   const alone = composition.species.map((species, i) => speciesAlone(species, x[i] ?? 0, request, trial));
-  const molarMasses = composition.species.map((species) => species.molarMass.value);
-  const viscosities = all(alone.map((one) => one.viscosity));
-  const conductivities = all(alone.map((one) => one.conductivity));
-  const heats = all(alone.map((one) => one.cp));
-  const pairs = pairsIn(composition, viscosities, point.temperature);
-  const diameters = all(alone.map((one) => one.diameter));
   const molarMass = meanMolarMass(composition);
+  const diameters = all(alone.map((one) => one.diameter));
+  const transport = transportOf(alone, composition, point, trial);
   return {
     request,
     point,
     molarMass,
     density: point.numberDensity * (molarMass / N_A),
+    cp: map(all(alone.map((one) => one.cp)), (values) => weighted(x, values)),
     virial: virialOnTrial(secondVirial(composition, point.temperature), trial),
-    cp: map(heats, (values) => weighted(x, values)),
-    viscosity: ofMixture(viscosities, () =>
-      map2(viscosities, pairs, (own, pair) => {
-        return factor(trial, 'mixture_viscosity') * mixtureViscosity(x, molarMasses, own, pair);
-      }),
-    ),
-    conductivity: ofMixture(conductivities, () =>
-      map2(conductivities, viscosities, (own, etas) => {
-        return factor(trial, 'mixture_conductivity') * mixtureConductivity(x, molarMasses, etas, own);
-      }),
-    ),
+    viscosity: transport.viscosity,
+    conductivity: transport.conductivity,
     species: alone.map((one, i) => ({
       ...one,
       freePath: map(diameters, (values) => freePath(i, alone, values)),
-      diffusivity: diffusivity(i, alone, composition, pairs, point, trial),
+      diffusivity: transport.diffusivities[i] ?? failure({ kind: 'empty-composition' }),
     })),
   };
 }
@@ -89,50 +70,6 @@ function freePath(i: number, species: readonly SpeciesAlone[], diameters: readon
     collisions += other.numberDensity * Math.PI * d * d * Math.sqrt(1 + mass / other.mass);
   });
   return 1 / collisions;
-}
-
-function diffusivity(
-  i: number,
-  alone: readonly SpeciesAlone[],
-  composition: Composition,
-  pairs: Outcome<Pairs>,
-  point: StatePoint,
-  trial: Trial,
-): Outcome<number> {
-  const T = point.temperature;
-  const one = alone[i];
-  if (one === undefined) return failure({ kind: 'empty-composition' });
-  if (alone.length === 1) {
-    return map(one.viscosity, (eta) => {
-      const value = selfDiffusivity(one.species, eta, point.numberDensity, T);
-      return factor(trial, 'self_diffusion') * value;
-    });
-  }
-  const { species, moleFractions } = composition;
-  return map(pairs, (pair) => {
-    const row = species.map((other, j) => {
-      const method = i === j || !isMeasured(one.species, other, T) ? 'pair_diffusion' : 'measured_diffusion';
-      return factor(trial, method) * pairDiffusion(i, j, species, pair, T);
-    });
-    return diffusionInMixture(i, moleFractions, row) / point.numberDensity;
-  });
-}
-
-/** Pair data are worked out only where there are pairs. */
-function pairsIn({ species }: Composition, viscosities: Outcome<readonly number[]>, T: number): Outcome<Pairs> {
-  const potentials: LennardJones[] = [];
-  for (const one of species) {
-    if (one.lennardJones === undefined) {
-      return failure({ kind: 'no-data', species: one.formula, property: 'pair_potential' });
-    }
-    potentials.push(one.lennardJones.value);
-  }
-  return map(viscosities, (own) => pairsOf(species, potentials, own, T));
-}
-
-/** One species keeps its own value; several need the rule for mixtures. */
-function ofMixture(values: Outcome<readonly number[]>, mixed: () => Outcome<number>): Outcome<number> {
-  return values.ok && values.value.length === 1 ? map(values, ([only = 0]) => only) : mixed();
 }
 
 function weighted(x: readonly number[], values: readonly number[]): number {

@@ -13,7 +13,7 @@ import { ofSpecies, overMolecules, total } from './property';
 const maxwell = { sources: ['Chapman & Cowling 1970'], restsOn: [] } as const;
 const spheres = { sources: ['Chapman & Cowling 1970'], restsOn: ['viscosity'] } as const;
 
-const pairDiffusionSources = [measuredDiffusionSource, 'Hirschfelder 1954', 'Neufeld 1972'] as const;
+const pairDiffusionSources = [measuredDiffusionSource, 'Hirschfelder 1954', 'Neufeld 1972', 'Fuller 1966'] as const;
 
 const mostProbable = ({ mass }: SpeciesState, { point }: GasState) => Math.sqrt((2 * k * point.temperature) / mass);
 const rms = ({ mass }: SpeciesState, { point }: GasState) => Math.sqrt((3 * k * point.temperature) / mass);
@@ -168,7 +168,8 @@ export const kineticProperties: readonly StateProperty[] = [
     quantityKind: 'diffusivity',
     method: 'self-diffusion from the viscosity, D = 6/5 A* η/ρ',
     mixed: {
-      method: 'pairs as measured, else first-order Chapman–Enskog; Dᵢ = (1 − xᵢ)/Σⱼ xⱼ/Dᵢⱼ',
+      method:
+        'pairs as measured, else first-order Chapman–Enskog, else Fuller–Schettler–Giddings; Dᵢ = (1 − xᵢ)/Σⱼ xⱼ/Dᵢⱼ',
       sources: pairDiffusionSources,
     },
     sources: ['Hirschfelder 1954', 'Neufeld 1972'],

@@ -1,4 +1,5 @@
-import { isMeasured } from '../transport/diffusion';
+import type { DiffusionMethod } from '../transport/diffusion';
+import { diffusionMethod } from '../transport/diffusion';
 import { measuredError } from '../transport/measuredDiffusion';
 import type { Sourced } from '../sources';
 import { conductionMethod } from '../transport/conductivity';
@@ -26,7 +27,7 @@ const methodErrors = {
   eucken: 0.1,
   monatomic_conductivity: 0.005,
   mixture_viscosity: 0.03,
-  mixture_conductivity: 0.06,
+  mixture_conductivity: 0.05,
   self_diffusion: 0.04,
 } as const;
 
@@ -56,16 +57,23 @@ export function modelErrors({ composition, point }: StateRequest): ModelError[] 
   return errors;
 }
 
-/** Pairs that are measured have an error of their own; among the others, polar molecules are the worst. */
+/** Each way of finding the diffusion of a pair has its own error; among the estimates, polar molecules are the worst. */
 function diffusionErrors(species: readonly Species[], T: number): ModelError[] {
   const pairs = species.flatMap((one, i) => species.slice(0, i).map((other) => ({ one, other })));
-  const estimated = pairs.filter(({ one, other }) => !isMeasured(one, other, T));
-  const polar = estimated.some(({ one, other }) => one.dipoleMoment !== undefined || other.dipoleMoment !== undefined);
-  const errors: ModelError[] = [];
-  if (estimated.length < pairs.length) errors.push({ key: 'measured_diffusion', relative: measuredError });
-  if (0 < estimated.length) errors.push({ key: 'pair_diffusion', relative: polar ? 0.25 : 0.1 });
-  return errors;
+  const found = new Map<DiffusionMethod, boolean>();
+  for (const { one, other } of pairs) {
+    const polar = one.dipoleMoment !== undefined || other.dipoleMoment !== undefined;
+    const by = diffusionMethod(one, other, T);
+    found.set(by, polar || (found.get(by) ?? false));
+  }
+  return [...found].map(([key, polar]) => ({ key, relative: diffusionError[key](polar) }));
 }
+
+const diffusionError: { readonly [method in DiffusionMethod]: (polar: boolean) => number } = {
+  measured_diffusion: () => measuredError,
+  pair_diffusion: (polar) => (polar ? 0.25 : 0.1),
+  fuller_diffusion: () => 0.15,
+};
 
 function method(key: keyof typeof methodErrors): ModelError {
   return { key, relative: methodErrors[key] };

@@ -24,9 +24,10 @@ const monatomic: Method = {
   method: 'first-order Chapman–Enskog, 15/4 R/M η, higher orders left out',
   sources: ['Chapman & Cowling 1970'],
 };
-const masonSaxena: Method = {
-  method: 'Wassiljewa with Mason–Saxena coefficients',
-  sources: ['Mason & Saxena 1958', 'Poling 2001', 'Chapman & Cowling 1970'],
+const conductingMixture: Method = {
+  method:
+    'first-order mixture by Muckenfuss & Curtiss, internal part by Hirschfelder, joined to the species’ own values',
+  sources: ['Muckenfuss & Curtiss 1958', 'Mason & Saxena 1958', 'Hirschfelder 1957', 'Neufeld 1972', 'Svehla 1962'],
 };
 const correlation: Method = { method: 'dilute-gas correlation', sources: [] };
 const conductionMethods = { correlation, monatomic, eucken } as const;
@@ -38,7 +39,7 @@ function throughConduction(method: string): Pick<StateProperty, 'method' | 'sour
     method,
     sources: eucken.sources,
     methodFor: (species) => ({ method, sources: conduction(species).sources }),
-    mixed: { method, sources: masonSaxena.sources },
+    mixed: { method, sources: conductingMixture.sources },
   };
 }
 
@@ -140,7 +141,7 @@ export const thermalProperties: readonly StateProperty[] = [
     perSpecies: true,
     ...eucken,
     methodFor: conduction,
-    mixed: masonSaxena,
+    mixed: conductingMixture,
     restsOn: ['viscosity', 'conductivity', 'heat_capacity'],
     compute: ({ conductivity }) => conductivity,
     computeFor: ({ conductivity }) => conductivity,

@@ -46,28 +46,6 @@ function isMonatomic(species: Species): boolean {
   return species.heatCapacity?.value.kind === 'monatomic';
 }
 
-/**
- * Thermal conductivity of a mixture, W/(m K), by Wassiljewa's equation with the coefficients of Mason & Saxena 1958
- * (eqs. 1 and 21 with ε = 1): λ = Σᵢ xᵢλᵢ / Σⱼ xⱼAᵢⱼ, Aᵢⱼ = [1 + √(λ′ᵢ/λ′ⱼ) (Mᵢ/Mⱼ)^¼]² / √(8(1 + Mᵢ/Mⱼ)),
- * where the translational conductivities λ′ stand as η/M. About 6 %.
- */
-export function mixtureConductivity(
-  x: readonly number[],
-  molarMass: readonly number[],
-  viscosity: readonly number[],
-  own: readonly number[],
-): number {
-  let sum = 0;
-  for (let i = 0; i < x.length; i++) {
-    let shared = 0;
-    for (let j = 0; j < x.length; j++) {
-      shared += at(x, j) * weight(at(molarMass, i) / at(molarMass, j), at(viscosity, i) / at(viscosity, j));
-    }
-    sum += (at(x, i) * at(own, i)) / shared;
-  }
-  return sum;
-}
-
 /** Without a heat capacity, only the growth of the viscosity counts. */
 function kinetic(species: Species, temperature: number): Outcome<number> {
   const eta = viscosity(species, temperature);
@@ -75,13 +53,4 @@ function kinetic(species: Species, temperature: number): Outcome<number> {
   const heat = species.heatCapacity?.value;
   if (heat === undefined) return eta;
   return success(kineticConductivity(species, eta.value, molarHeatCapacity(heat, temperature) - R));
-}
-
-function weight(massRatio: number, viscosityRatio: number): number {
-  const root = 1 + Math.sqrt(viscosityRatio / Math.sqrt(massRatio));
-  return (root * root) / Math.sqrt(8 * (1 + massRatio));
-}
-
-function at(values: readonly number[], index: number): number {
-  return values[index] ?? 0;
 }

@@ -1,6 +1,9 @@
 import { k, N_A } from '../constants';
+import type { Outcome } from '../outcome';
+import { failure, success } from '../outcome';
 import type { Species } from '../species/species';
 import { aStar, combined, omega11 } from './collisionIntegrals';
+import { fullerDiffusion } from './fullerDiffusion';
 import type { MeasuredPair } from './measuredDiffusion';
 import { measuredDiffusion, measuredPair, measuredRange } from './measuredDiffusion';
 import type { Pairs } from './pairs';
@@ -24,22 +27,39 @@ export function selfDiffusivity(
   return (1.2 * ratio * viscosity) / (numberDensity * (species.molarMass.value / N_A));
 }
 
-/** Whether the diffusion of a pair is measured at this temperature, or estimated from the potentials. */
-export function isMeasured(one: Species, other: Species, temperature: number): boolean {
+/** How the diffusion of a pair is found; the names are those of its errors. */
+export type DiffusionMethod = 'measured_diffusion' | 'pair_diffusion' | 'fuller_diffusion';
+
+/** Measured, or estimated from the potentials, or where these are unknown from the volumes of the atoms. */
+export function diffusionMethod(one: Species, other: Species, temperature: number): DiffusionMethod {
   const { low, high } = measuredRange;
-  return low <= temperature && temperature <= high && measuredPair(one.formula, other.formula) !== undefined;
+  const row = one === other ? undefined : measuredPair(one.formula, other.formula);
+  if (row !== undefined) return low <= temperature && temperature <= high ? 'measured_diffusion' : 'pair_diffusion';
+  return hasPotential(one) && hasPotential(other) ? 'pair_diffusion' : 'fuller_diffusion';
 }
 
 /**
  * n Dᵢⱼ of two species, 1/(m s), which does not depend on pressure. `i` and `j` are their places among the pairs.
  * Measured if it has been; beyond the measured range continued in proportion to the 12-6 potential; else estimated.
  */
-export function pairDiffusion(i: number, j: number, species: readonly Species[], pairs: Pairs, T: number): number {
+export function pairDiffusion(
+  i: number,
+  j: number,
+  species: readonly Species[],
+  pairs: Pairs,
+  T: number,
+): Outcome<number> {
   const one = species[i];
   const other = species[j];
-  if (one === undefined || other === undefined) return 0;
+  if (one === undefined || other === undefined) return failure({ kind: 'empty-composition' });
   const row = i === j ? undefined : measuredPair(one.formula, other.formula);
-  return row === undefined ? estimated(i * species.length + j, one, other, pairs) : measured(row, one, other, T);
+  if (row !== undefined) return success(measured(row, one, other, T));
+  const fromPotentials = estimated(i * species.length + j, one, other, pairs);
+  if (Number.isFinite(fromPotentials)) return success(fromPotentials);
+  const fromVolumes = fullerDiffusion(one, other, T);
+  if (fromVolumes !== undefined) return success(fromVolumes);
+  const lacking = hasPotential(one) ? other : one;
+  return failure({ kind: 'no-data', species: lacking.formula, property: 'pair_potential' });
 }
 
 /**
@@ -70,6 +90,11 @@ function measured(row: MeasuredPair, one: Species, other: Species, T: number): n
   const end = Math.min(Math.max(T, measuredRange.low), measuredRange.high);
   const atEnd = measuredDiffusion(row, end) / (k * end);
   return end === T ? atEnd : atEnd * (potentialDiffusion(one, other, T) / potentialDiffusion(one, other, end));
+}
+
+/** A pair needs the potentials of both, and their viscosities to scale them by. */
+function hasPotential({ lennardJones, viscosity }: Species): boolean {
+  return lennardJones !== undefined && viscosity !== undefined;
 }
 
 /** How n D of the 12-6 potential grows with temperature: √T / Ω(1,1)*. Without potentials, √T. */

@@ -1,3 +1,4 @@
+import { solveDominant } from './linearSystem';
 import type { Pairs } from './pairs';
 
 /**
@@ -29,28 +30,10 @@ export function mixtureViscosity(
     rows[i * width + i] = diagonal;
     rows[i * width + n] = 1;
   }
-  eliminate(rows, n);
+  solveDominant(rows, n);
   let viscosity = 0;
   for (let i = 0; i < n; i++) viscosity += at(x, i) * at(rows, i * width + n);
   return viscosity;
-}
-
-/** Gauss–Jordan without pivoting, which a diagonally dominant matrix does not need. The last column becomes the solution. */
-function eliminate(rows: Float64Array, n: number): void {
-  const width = n + 1;
-  for (let pivot = 0; pivot < n; pivot++) {
-    const inverse = 1 / at(rows, pivot * width + pivot);
-    for (let column = pivot; column < width; column++) {
-      rows[pivot * width + column] = at(rows, pivot * width + column) * inverse;
-    }
-    for (let row = 0; row < n; row++) {
-      const factor = at(rows, row * width + pivot);
-      if (row === pivot || factor === 0) continue;
-      for (let column = pivot; column < width; column++) {
-        rows[row * width + column] = at(rows, row * width + column) - factor * at(rows, pivot * width + column);
-      }
-    }
-  }
 }
 
 function at(values: ArrayLike<number>, index: number): number {
