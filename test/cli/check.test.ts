@@ -310,6 +310,12 @@ describe('tenuity format', () => {
     assert.equal(tenuity(['format', '-'], { input: rough }).out, neat);
   });
 
+  it('finds the samples as they should be', () => {
+    const { code, err } = tenuity(['format', '--check', 'samples']);
+    assert.equal(err, '');
+    assert.equal(code, 0);
+  });
+
   it('leaves what cannot be read as it is', () => {
     const broken = 'let   a = = 5\nlet b=2 mm\n';
     assert.equal(tenuity(['format', '-'], { input: broken }).out, 'let   a = = 5\nlet b = 2 mm\n');

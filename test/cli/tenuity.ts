@@ -1,4 +1,4 @@
-import { spawnSync } from 'node:child_process';
+import { execFileSync, spawnSync } from 'node:child_process';
 import { existsSync } from 'node:fs';
 
 /** What a call of the built command line did. */
@@ -10,12 +10,12 @@ export interface Ran {
 
 const CLI = 'dist/cli.js';
 
-/** Runs the command line as a person would; `npm test` builds it first. */
+/** Runs the command line as a person would; it is built where it is not there yet. */
 export function tenuity(
   args: readonly string[],
   { input = '', env = {} }: { input?: string; env?: Record<string, string> } = {},
 ): Ran {
-  if (!existsSync(CLI)) throw new Error(`${CLI} is not built: npm run build`);
+  if (!existsSync(CLI)) execFileSync(process.execPath, ['esbuild.mjs']);
   const { NO_COLOR: _none, FORCE_COLOR: _forced, ...rest } = process.env;
   const { status, stdout, stderr } = spawnSync(process.execPath, [CLI, ...args], {
     input,
