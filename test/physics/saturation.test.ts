@@ -7,7 +7,7 @@ import {
   saturationRange,
   wouldCondense,
 } from '../../server/src/physics/thermo/saturation';
-import { logSaturation } from '../../server/src/physics/thermo/saturationCurve';
+import { logSaturation, saturationTemperature } from '../../server/src/physics/thermo/saturationCurve';
 import { figures, gas, mixture, near, part, valueOf, whole } from '../support/gases';
 import { references } from '../support/reference';
 
@@ -166,6 +166,7 @@ describe('saturation', () => {
     assert.equal(reason('N2', 126.2), 'above-critical');
     assert.equal(reason('N2', 15), 'outside-range');
     assert.equal(reason('Ne', 42), 'outside-range');
+    assert.equal(reason('He', 300), 'above-critical');
     assert.equal(reason('H2O', 647.096), 'value');
     const bare = { ...gas('N2'), saturation: [] };
     const missing = saturationPressure(bare, 77);
@@ -183,6 +184,25 @@ describe('saturation', () => {
     assert.ok(!wouldCondense(gas('N2'), 300, 1e9));
     assert.equal(condensedPhase(gas('H2O'), 270), 'solid');
     assert.equal(condensedPhase(gas('H2O'), 280), 'liquid');
+  });
+});
+
+describe('the forms of a saturation curve', () => {
+  it('take the equation of Antoine', () => {
+    // Water from 1 to 100 °C, mmHg and °C: A = 8.07131, B = 1730.63, C = 233.426; common practice, no source.
+    const antoine = {
+      kind: 'antoine',
+      phase: 'liquid',
+      low: 274.15,
+      high: 373.15,
+      pressure: 133.322,
+      a: 8.07131,
+      b: 1730.63,
+      c: 233.426 - 273.15,
+    } as const;
+    for (const T of [280, 300, 340, 373])
+      near(Math.exp(logSaturation(antoine, T)), saturated('H2O', T), 0.01, `${T} K`);
+    near(saturationTemperature(antoine, Math.log(101325)), 373.15, 1e-4);
   });
 });
 

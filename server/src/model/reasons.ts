@@ -9,7 +9,7 @@ export function explainReason(reason: Reason): string {
     case 'no-data':
       return `no ${dataTitle(reason.property)} is known for ${reason.species}`;
     case 'outside-range':
-      return `${spoken(reason.quantity)} is ${formatNumber(reason.value, 4)}, outside ${formatNumber(reason.low, 4)} to ${formatNumber(reason.high, 4)} where anything is known`;
+      return `${spoken(reason.quantity)} is ${withUnit(reason.value, reason.quantity)}, outside ${formatNumber(reason.low, 4)} to ${withUnit(reason.high, reason.quantity)} where anything is known`;
     case 'not-positive':
       return `${spoken(reason.quantity)} is ${formatNumber(reason.value, 4)}; it must be above zero`;
     case 'not-finite':
@@ -61,3 +61,13 @@ export function citation(id: SourceId): string {
 export function spoken(name: string): string {
   return name.replace(/_/g, ' ').replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
 }
+
+/** The numbers of a reason are SI. */
+function withUnit(value: number, quantity: string): string {
+  return `${formatNumber(value, 4)}${units.get(quantity) ?? ''}`;
+}
+
+const units: ReadonlyMap<string, string> = new Map([
+  ['temperature', ' K'],
+  ['pressure', ' Pa'],
+]);

@@ -72,6 +72,7 @@ function assumptionsOf(given: Given, scope: Scope): (name: string) => readonly s
   const stated = given.inputs.has('collision_diameter') ? ['the collision diameter that the file states'] : [];
   return (name) => {
     if (name === 'monolayer_time') return [sites];
+    if (name === 'condensation_margin' || name === 'dew_point') return ['what condenses is of this species alone'];
     return name === 'mean_free_path_hard_sphere' || name === 'collision_frequency' ? stated : [];
   };
 }

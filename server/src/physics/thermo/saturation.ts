@@ -19,7 +19,10 @@ export function saturationPressure(species: Species, temperature: number): Outco
     const here = curves.find(({ curve }) => temperature < curve.high) ?? last;
     return success(Math.exp(logPressure(here, temperature)));
   }
-  if (high < temperature && endsCritically(last.curve)) return aboveCritical(species, 'temperature', high);
+  const critical = criticalPoint(species, last.curve);
+  if (critical !== undefined && critical.temperature < temperature) {
+    return aboveCritical(species, 'temperature', critical.temperature);
+  }
   return failure({ kind: 'outside-range', quantity: 'temperature', value: temperature, low, high });
 }
 
@@ -36,7 +39,9 @@ export function dewPoint(species: Species, pressure: number): Outcome<number> {
     const here = curves.find((each) => wanted < logPressure(each, each.curve.high)) ?? last;
     return success(saturationTemperature(here.curve, wanted - here.shift));
   }
-  if (high < wanted && endsCritically(last.curve)) return aboveCritical(species, 'pressure', Math.exp(high));
+  const critical = criticalPoint(species, last.curve);
+  if (critical !== undefined && critical.pressure < pressure)
+    return aboveCritical(species, 'pressure', critical.pressure);
   const range = { low: Math.exp(low), high: Math.exp(high) };
   return failure({ kind: 'outside-range', quantity: 'pressure', value: pressure, ...range });
 }
@@ -99,8 +104,12 @@ function logPressure({ curve, shift }: Joined, T: number): number {
   return logSaturation(curve, T) + shift;
 }
 
-function endsCritically(curve: SaturationCurve): boolean {
-  return curve.phase === 'liquid' && curve.kind === 'wagner' && curve.high === curve.temperature;
+/** Wagner's equation of a liquid ends at the critical point; of the others the species may know it. */
+function criticalPoint(
+  species: Species,
+  warmest: SaturationCurve,
+): { readonly temperature: number; readonly pressure: number } | undefined {
+  return warmest.kind === 'wagner' && warmest.phase === 'liquid' ? warmest : species.critical?.value;
 }
 
 function unknown(species: Species): Outcome<number> {
