@@ -8,7 +8,7 @@ interface AlignOptions {
 
 /** Rows of cells in columns, each as wide as its widest cell. */
 export function aligned(given: readonly (readonly string[])[], { indent, style }: AlignOptions): string {
-  const rows = given.map((row) => row.map(printable));
+  const rows = given.map((row) => row.map((cell) => printable(cell).trimEnd()));
   const widths: number[] = [];
   for (const row of rows)
     row.forEach((cell, column) => (widths[column] = Math.max(widths[column] ?? 0, columnsOf(cell))));

@@ -14,5 +14,4 @@ export function printable(text: string): string {
 const CONTROL_PICTURES = 0x2400;
 
 /** Control characters, marks of writing direction, line separators, and halves of surrogate pairs. */
-const DRIVING =
-  /[\p{Cc}\u200E\u200F\u2028-\u202E\u2066-\u2069]|[\uD800-\uDBFF](?![\uDC00-\uDFFF])|(?<![\uD800-\uDBFF])[\uDC00-\uDFFF]/gu;
+const DRIVING = /[\p{Cc}\p{Cs}\p{Bidi_Control}\u2028\u2029]/gu;
