@@ -1,6 +1,5 @@
 import assert from 'node:assert/strict';
 import { readdirSync, readFileSync } from 'node:fs';
-import path from 'node:path';
 import type { InlayHint } from 'vscode-languageserver-protocol/node';
 import type { Client, OpenFile } from './client';
 import { spawnServer } from './server';
@@ -32,7 +31,7 @@ describe('typing', () => {
   for (const record of records) {
     it(`${record} key by key ends where opening it ends`, async () => {
       const text = readFileSync(record, 'utf8');
-      const typed = client.open(`file:///typed/${path.basename(record)}`, '');
+      const typed = client.open(`file:///typed/${record}`, '');
       const answers = keys(text).map(({ offset, key }) => {
         typed.replace(offset, offset, key);
         const position = typed.document.positionAt(offset + key.length);
@@ -44,7 +43,7 @@ describe('typing', () => {
 
     it(`${record} taken away from its end and put back is as before`, async () => {
       const text = readFileSync(record, 'utf8');
-      const file = client.open(`file:///halved/${path.basename(record)}`, text);
+      const file = client.open(`file:///halved/${record}`, text);
       for (let end = text.length; end > 0; end -= 1) file.replace(end - 1, end, '');
       file.replace(0, 0, text);
       await endsLikeAFreshOne(file, record);
@@ -84,7 +83,7 @@ describe('typing', () => {
   });
 
   async function endsLikeAFreshOne(file: OpenFile, record: string): Promise<void> {
-    const fresh = client.open(`file:///fresh/${path.basename(record)}`, readFileSync(record, 'utf8'));
+    const fresh = client.open(`file:///fresh/${record}`, readFileSync(record, 'utf8'));
     assert.deepEqual(await file.problems(), await fresh.problems());
     for (const view of views) {
       const [ours, theirs] = await Promise.all([file.ask(view, everything), fresh.ask(view, everything)]);
