@@ -1,5 +1,6 @@
 import assert from 'node:assert/strict';
 import { readdirSync, readFileSync } from 'node:fs';
+import path from 'node:path';
 import type { InlayHint } from 'vscode-languageserver-protocol/node';
 import type { Client, OpenFile } from './client';
 import { spawnServer } from './server';
