@@ -219,7 +219,7 @@ describe('completion after a point', () => {
   it('offers nothing of what has no results', () => {
     check(`${bench}let a = size.<*>`, []);
     check(`${bench}let a = nothing.<*>`, []);
-    check(`${bench}let a = lock.<*>`, []);
+    check(`${bench}pump dry { speed = 10 L/s }\nlet a = dry.<*>`, []);
   });
 });
 

@@ -1,3 +1,6 @@
+import { add, divide, multiply, subtract } from '../arithmetic';
+import { plainNumber, show } from '../quantity';
+import { given, mustBe, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { accommodation, length } from './kind';
 
@@ -19,6 +22,32 @@ export const annulus: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['area', 'volume', 'hydraulic_diameter', 'characteristic_length', 'transmission_probability'],
+  later: ['transmission_probability'],
   snippet: 'annulus ${1:name} { inner = ${2:30 mm}, outer = ${3:40 mm}, length = ${4:0.5 m} }',
+  compute: (declared, scope) => {
+    const { inputs } = declared;
+    const sizes = given(inputs, 'inner', 'outer', 'length');
+    if (!sizes) return undefined;
+    const { inner, outer, length: along } = sizes;
+    const bound = `below the outer diameter, ${show(outer)}`;
+    if (!mustBe(inner.si < outer.si, { key: 'inner', value: inner, bound }, declared, scope)) return undefined;
+    const width = subtract(outer, inner);
+    const gap = divide(width, plainNumber(2));
+    const rim = multiply(plainNumber(Math.PI), add(outer, inner));
+    const area = divide(multiply(rim, width), plainNumber(4));
+    return passageRecord('annulus', inputs, {
+      method: 'geometry of the gap between coaxial cylinders',
+      geometry: {
+        inner,
+        outer,
+        length: along,
+        area,
+        volume: multiply(area, along),
+        wall_area: multiply(rim, along),
+        hydraulic_diameter: width,
+        characteristic_length: gap,
+        aspect_ratio: divide(along, gap),
+      },
+    });
+  },
 };

@@ -1,3 +1,8 @@
+import { multiply } from '../arithmetic';
+import { figure } from '../figures';
+import { quantityInput } from '../inputs';
+import type { Figure, Quantity } from '../values';
+import { mustBe, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { ofQuantity } from './kind';
 
@@ -21,6 +26,39 @@ export const bundle: Kind = {
     { count: 1, of: ['count'] },
   ],
   hint: ['area'],
-  later: ['area', 'volume', 'characteristic_length', 'transmission_probability'],
+  later: [],
   snippet: 'bundle ${1:name} { of = ${2:passage}, count = ${3:7} }',
+  compute: (declared, scope) => {
+    const { inputs } = declared;
+    const one = inputs.get('of');
+    const count = quantityInput(inputs, 'count');
+    if (one?.kind !== 'record' || !count) return undefined;
+    const whole = Number.isInteger(count.si);
+    if (!mustBe(whole, { key: 'count', value: count, bound: 'a whole number' }, declared, scope)) return undefined;
+    const others = [...one.members].filter(([name]) => SUMS.includes(name) || KEPT.includes(name));
+    return passageRecord('bundle', inputs, {
+      method: 'equal passages side by side',
+      geometry: {},
+      others: others.map(([name, each]) => [name, SUMS.includes(name) ? times(each, count) : each]),
+    });
+  },
 };
+
+/** What all the passages have together. */
+const SUMS: readonly string[] = ['area', 'volume', 'wall_area'];
+
+/** What is the same of one passage as of all. */
+const KEPT: readonly string[] = [
+  'length',
+  'hydraulic_diameter',
+  'characteristic_length',
+  'aspect_ratio',
+  'transmission_probability',
+];
+
+function times(one: Figure, count: Quantity): Figure {
+  if (one.kind !== 'figure' || one.value.kind !== 'quantity') return one;
+  const { quantityKind } = one.value;
+  const value = { ...multiply(one.value, count), ...(quantityKind === undefined ? {} : { quantityKind }) };
+  return figure(value, { ...one.provenance, method: `the count times that of one: ${one.provenance.method}` });
+}

@@ -1,3 +1,9 @@
+import { divide, map, multiply } from '../arithmetic';
+import { plainNumber } from '../quantity';
+import { powerDimension } from '../../quantities/dimension';
+import { figures } from '../figures';
+import { quantityInput } from '../inputs';
+import type { Members, Quantity } from '../values';
 import type { Kind } from './kind';
 import { ofQuantity } from './kind';
 
@@ -26,6 +32,37 @@ export const chamber: Kind = {
   ],
   needs: [{ count: 1, of: ['volume'] }],
   hint: ['volume'],
-  later: ['volume', 'wall_area', 'characteristic_length'],
+  later: [],
   snippet: 'chamber ${1:name} { volume = ${2:50 L}, wall_area = ${3:1 m²} }',
+  compute: ({ inputs }) => {
+    const volume = quantityInput(inputs, 'volume');
+    if (!volume) return undefined;
+    const wall = quantityInput(inputs, 'wall_area');
+    return {
+      kind: 'record',
+      word: 'chamber',
+      inputs,
+      species: new Map(),
+      members: new Map([
+        ...figures('as given', { volume, ...(wall ? { wall_area: wall } : {}) }),
+        ...(wall ? meanChord(volume, wall) : edge(volume)),
+      ]),
+    };
+  },
 };
+
+/** ℓ = 4V/S */
+function meanChord(volume: Quantity, wall: Quantity): Members {
+  return figures('4 V/S, the mean length of the chords through the chamber', {
+    characteristic_length: divide(multiply(plainNumber(4), volume), wall),
+  });
+}
+
+/** ℓ = V^(1/3) */
+function edge(volume: Quantity): Members {
+  const si = Math.cbrt(volume.si);
+  const length = map(volume, si, si / (3 * volume.si), powerDimension(volume.dimension, 1 / 3));
+  return figures('V^(1/3), the edge of a cube of this volume', { characteristic_length: length }, [
+    'a chamber about as long as wide (no wall area given)',
+  ]);
+}

@@ -1,3 +1,8 @@
+import { add, divide, map, multiply, subtract } from '../arithmetic';
+import { powerDimension } from '../../quantities/dimension';
+import { plainNumber } from '../quantity';
+import type { Quantity } from '../values';
+import { given, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { accommodation, length } from './kind';
 
@@ -19,6 +24,34 @@ export const cone: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['area', 'volume', 'hydraulic_diameter', 'characteristic_length', 'transmission_probability'],
+  later: ['transmission_probability'],
   snippet: 'cone ${1:name} { inlet_bore = ${2:40 mm}, outlet_bore = ${3:25 mm}, length = ${4:80 mm} }',
+  compute: ({ inputs }) => {
+    const sizes = given(inputs, 'inlet_bore', 'outlet_bore', 'length');
+    if (!sizes) return undefined;
+    const { inlet_bore: inlet, outlet_bore: outlet, length: along } = sizes;
+    const smaller = inlet.si < outlet.si ? inlet : outlet;
+    const squares = add(add(multiply(inlet, inlet), multiply(inlet, outlet)), multiply(outlet, outlet));
+    return passageRecord('cone', inputs, {
+      method: 'geometry of a frustum of a cone; area: that of the inlet',
+      geometry: {
+        inlet_bore: inlet,
+        outlet_bore: outlet,
+        length: along,
+        area: multiply(plainNumber(Math.PI / 4), multiply(inlet, inlet)),
+        volume: multiply(plainNumber(Math.PI / 12), multiply(squares, along)),
+        wall_area: multiply(plainNumber(Math.PI / 2), multiply(add(inlet, outlet), slant(inlet, outlet, along))),
+        characteristic_length: smaller,
+        aspect_ratio: divide(along, smaller),
+      },
+    });
+  },
 };
+
+/** The length of the wall along a straight line down it. */
+function slant(inlet: Quantity, outlet: Quantity, along: Quantity): Quantity {
+  const half = divide(subtract(inlet, outlet), plainNumber(2));
+  const square = add(multiply(half, half), multiply(along, along));
+  const si = Math.sqrt(square.si);
+  return map(square, si, 1 / (2 * si), powerDimension(square.dimension, 0.5));
+}

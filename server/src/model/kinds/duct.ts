@@ -1,3 +1,6 @@
+import { add, divide, multiply } from '../arithmetic';
+import { plainNumber } from '../quantity';
+import { given, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { accommodation, length } from './kind';
 
@@ -19,6 +22,28 @@ export const duct: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['area', 'volume', 'hydraulic_diameter', 'characteristic_length', 'transmission_probability'],
+  later: ['transmission_probability'],
   snippet: 'duct ${1:name} { width = ${2:60 mm}, height = ${3:20 mm}, length = ${4:1 m} }',
+  compute: ({ inputs }) => {
+    const sides = given(inputs, 'width', 'height', 'length');
+    if (!sides) return undefined;
+    const { width, height, length: along } = sides;
+    const area = multiply(width, height);
+    const rim = multiply(plainNumber(2), add(width, height));
+    const smaller = width.si < height.si ? width : height;
+    return passageRecord('duct', inputs, {
+      method: 'geometry of a rectangular duct',
+      geometry: {
+        width,
+        height,
+        length: along,
+        area,
+        volume: multiply(area, along),
+        wall_area: multiply(rim, along),
+        hydraulic_diameter: divide(multiply(plainNumber(4), area), rim),
+        characteristic_length: smaller,
+        aspect_ratio: divide(along, smaller),
+      },
+    });
+  },
 };

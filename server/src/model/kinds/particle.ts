@@ -1,3 +1,6 @@
+import { multiply } from '../arithmetic';
+import { plainNumber } from '../quantity';
+import { given, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { length, ofQuantity } from './kind';
 
@@ -16,6 +19,17 @@ export const particle: Kind = {
     { count: 1, of: ['density'] },
   ],
   hint: ['diameter'],
-  later: ['diameter', 'density'],
+  later: [],
   snippet: 'particle ${1:name} { diameter = ${2:1 µm}, density = ${3:2500 kg/m³} }',
+  compute: ({ inputs }) => {
+    const sizes = given(inputs, 'diameter', 'density');
+    if (!sizes) return undefined;
+    const { diameter, density } = sizes;
+    const surface = multiply(plainNumber(Math.PI), multiply(diameter, diameter));
+    const volume = multiply(plainNumber(1 / 6), multiply(surface, diameter));
+    return passageRecord('particle', inputs, {
+      method: 'geometry of a sphere',
+      geometry: { diameter, density, volume, mass: multiply(density, volume), characteristic_length: diameter },
+    });
+  },
 };

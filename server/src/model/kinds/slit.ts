@@ -1,3 +1,6 @@
+import { divide, multiply } from '../arithmetic';
+import { plainNumber } from '../quantity';
+import { given, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { accommodation, length } from './kind';
 
@@ -19,6 +22,26 @@ export const slit: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['area', 'volume', 'hydraulic_diameter', 'characteristic_length', 'transmission_probability'],
+  later: ['transmission_probability'],
   snippet: 'slit ${1:name} { height = ${2:0.1 mm}, width = ${3:100 mm}, length = ${4:10 mm} }',
+  compute: ({ inputs }) => {
+    const sides = given(inputs, 'height', 'width', 'length');
+    if (!sides) return undefined;
+    const { height, width, length: along } = sides;
+    const area = multiply(width, height);
+    return passageRecord('slit', inputs, {
+      method: 'geometry of a gap between two plates, without its end walls',
+      geometry: {
+        height,
+        width,
+        length: along,
+        area,
+        volume: multiply(area, along),
+        wall_area: multiply(plainNumber(2), multiply(width, along)),
+        hydraulic_diameter: multiply(plainNumber(2), height),
+        characteristic_length: height,
+        aspect_ratio: divide(along, height),
+      },
+    });
+  },
 };
