@@ -17,7 +17,7 @@ export const scenes = [
     name: 'record',
     file: 'load-lock.gas',
     theme: 'light',
-    size: { width: 960, height: 640 },
+    size: { width: 1000, height: 700 },
     show: [
       { kind: 'wait', for: HINT },
       { kind: 'hover', at: { line: 'state residual', word: 'residual' }, showing: 'mean_free_path' },
@@ -27,7 +27,7 @@ export const scenes = [
     name: 'fix',
     file: 'load-lock.gas',
     theme: 'light',
-    size: { width: 960, height: 480 },
+    size: { width: 1000, height: 640 },
     show: [
       { kind: 'wait', for: HINT },
       { kind: 'replace', at: { line: '3e-3 mbar', word: 'mbar' }, text: 'mm' },

@@ -38,24 +38,22 @@ fs.mkdirSync(pictures, { recursive: true });
 const scratch = makeScratch();
 const vsix = path.join(scratch.folder, 'tenuity.vsix');
 await packageExtension(root, vsix);
-for (const theme of Object.keys(THEMES)) {
-  const list = scenes.filter((scene) => scene.theme === theme && (wanted.length === 0 || wanted.includes(scene.name)));
-  if (list.length > 0) await takePictures(theme, list);
+for (const scene of scenes) {
+  if (wanted.length === 0 || wanted.includes(scene.name)) await takeScene(scene);
 }
 scratch.remove();
 
-/** One VS Code a theme; the page is loaded anew for each picture, so that none sees what another left open. */
-async function takePictures(theme, list) {
+/** One VS Code a picture, so that none sees what another left open. */
+async function takeScene(scene) {
+  const { name, theme } = scene;
   const host = await startHost(samples, {
     extension: { kind: 'packaged', vsix },
     settings: { ...SETTINGS, 'workbench.colorTheme': THEMES[theme] },
     screen: { deviceScaleFactor: 2, colorScheme: theme },
   });
   try {
-    for (const scene of list) {
-      await takePicture(host, scene);
-      console.log(`samples/pictures/${scene.name}.png`);
-    }
+    await takePicture(host, scene);
+    console.log(`samples/pictures/${name}.png`);
   } finally {
     await host.stop();
   }

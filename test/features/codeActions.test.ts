@@ -2,7 +2,7 @@ import assert from 'node:assert/strict';
 import { describe, it } from 'mocha';
 import type { CodeAction } from '../../server/src/features/codeActions';
 import { codeActions, fixAll } from '../../server/src/features/codeActions';
-import type { TextEdit } from '../../server/src/features/refactorings/textEdit';
+import type { TextEdit } from '../../server/src/features/textEdit';
 import type { Analysis } from '../../server/src/model/analysis';
 import { analyse, cursor } from '../support/analyse';
 import { samples } from './samples';

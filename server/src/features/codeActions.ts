@@ -1,4 +1,5 @@
 import type { Analysis, LocatedProblem } from '../model/analysis';
+import { unitMismatch } from '../model/problems/unitMismatch';
 import { unusedDeclaration } from '../model/problems/unusedDeclaration';
 import type { Fix } from '../model/problems/problem';
 import type { Span } from '../syntax/nodes';
@@ -6,7 +7,7 @@ import { convertLiteral } from './refactorings/convertLiteral';
 import { extractLet } from './refactorings/extractLet';
 import { inlineLet } from './refactorings/inlineLet';
 import { removeDeclaration } from './refactorings/removeDeclaration';
-import type { TextEdit } from './refactorings/textEdit';
+import type { TextEdit } from './textEdit';
 
 export interface CodeAction {
   readonly title: string;
@@ -20,14 +21,14 @@ export interface CodeAction {
 
 /** What can be done to the text at a range: the fixes of its problems, then the refactorings. */
 export function codeActions(analysis: Analysis, range: Span): readonly CodeAction[] {
+  const problems = analysis.problems().filter(touches(range));
+  // A unit that is wrong wants another unit, not the same mistake in other words.
+  const conversions = problems.some(({ problem }) => problem.code === unitMismatch.code)
+    ? []
+    : convertLiteral(analysis, range);
   return [
-    ...analysis
-      .problems()
-      .filter(touches(range))
-      .flatMap((located) => fixesOf(located, analysis)),
-    ...convertLiteral(analysis, range).map(
-      (each) => ({ ...each, kind: 'refactor.rewrite', preferred: false }) as const,
-    ),
+    ...problems.flatMap((located) => fixesOf(located, analysis)),
+    ...conversions.map((each) => ({ ...each, kind: 'refactor.rewrite', preferred: false }) as const),
     ...extractLet(analysis, range).map((each) => ({ ...each, kind: 'refactor.extract', preferred: false }) as const),
     ...inlineLet(analysis, range).map((each) => ({ ...each, kind: 'refactor.inline', preferred: false }) as const),
   ];

@@ -36,7 +36,7 @@ export const quantityKinds: readonly QuantityKind[] = [
   kind('time', 's', ['s', 'min', 'h', 'ms'], 'a duration', { ladder: ['ns', 'µs', 'ms', 's', 'min', 'h', 'd'] }),
   kind('frequency', '1/s', ['1/s', 'Hz', 'kHz'], 'events per time'),
   kind('molecule_flow', '1/s', ['1/s'], 'molecules per time'),
-  kind('speed', 'm/s', ['m/s', 'mm/s', 'km/h', 'ft/s'], 'distance per time', {
+  kind('speed', 'm/s', ['m/s', 'km/s', 'mm/s', 'km/h'], 'distance per time', {
     ladder: ['nm/s', 'µm/s', 'mm/s', 'm/s'],
   }),
   kind('mass', 'kg', ['g', 'kg', 'mg', 'u'], 'a mass', { ladder: ['ng', 'µg', 'mg', 'g', 'kg'] }),

@@ -9,7 +9,8 @@ import { wantedAt } from '../completion/completionWanted';
 import { kindMeant } from '../describe/describeUnits';
 import { readingOfSi, siOfReading, writeQuantity } from './literalReading';
 import { selectionAt } from './selection';
-import type { Refactoring, TextEdit } from './textEdit';
+import type { TextEdit } from '../textEdit';
+import type { Refactoring } from './refactoring';
 
 /** Writes a number in the other usual units of its kind, and its half-width with it where that has a unit of its own. */
 export function convertLiteral(analysis: Analysis, range: Span): readonly Refactoring[] {

@@ -6,7 +6,7 @@ import { contains } from './contains';
 import { declarationStart } from './declarationStart';
 import { isExpression } from './isExpression';
 import { selectionAt } from './selection';
-import type { Refactoring } from './textEdit';
+import type { Refactoring } from './refactoring';
 
 /** Gives an expression of an entry or a condition a name of its own, with a `let` above the declaration. */
 export function extractLet(analysis: Analysis, range: Span): readonly Refactoring[] {

@@ -4,7 +4,7 @@ import { references } from '../../model/references';
 import type { Expression, LetDeclaration, Node, Span } from '../../syntax/nodes';
 import { contains } from './contains';
 import { selectionAt } from './selection';
-import type { Refactoring } from './textEdit';
+import type { Refactoring } from './refactoring';
 
 /** Writes the value of a `let` in the place of its name, in parentheses where it would be read otherwise. */
 export function inlineLet(analysis: Analysis, range: Span): readonly Refactoring[] {

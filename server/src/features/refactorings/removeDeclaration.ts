@@ -1,7 +1,7 @@
 import type { Analysis } from '../../model/analysis';
 import type { Declared } from '../../model/declare';
 import { declarationStart } from './declarationStart';
-import type { Refactoring } from './textEdit';
+import type { Refactoring } from './refactoring';
 
 /** Takes a declaration away with the lines that document it. */
 export function removeDeclaration({ text }: Analysis, { item, name }: Declared): Refactoring {

@@ -1,0 +1,7 @@
+import type { TextEdit } from '../textEdit';
+
+/** What a refactoring does. */
+export interface Refactoring {
+  readonly title: string;
+  readonly edits: readonly TextEdit[];
+}
