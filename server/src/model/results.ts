@@ -71,6 +71,9 @@ const meanings: Readonly<{ [name: string]: string | Omit<ResultDefinition, 'name
   diameter: { symbol: 'd', quantityKind: 'length', meaning: 'the diameter' },
   mass: { symbol: 'm', quantityKind: 'mass', meaning: 'volume times density' },
   length: { symbol: 'L', quantityKind: 'length', meaning: 'the length along the axis' },
+  spacing: { symbol: 'h', quantityKind: 'length', meaning: 'the distance of the walls' },
+  inner_area: { quantityKind: 'area', meaning: 'the area of the inner wall' },
+  outer_area: { quantityKind: 'area', meaning: 'the area of the outer wall' },
   thickness: { symbol: 't', quantityKind: 'length', meaning: 'the thickness of the wall' },
   area: { symbol: 'A', quantityKind: 'area', meaning: 'the area of the section' },
   volume: { symbol: 'V', quantityKind: 'volume', meaning: 'the volume inside' },
@@ -103,6 +106,35 @@ const meanings: Readonly<{ [name: string]: string | Omit<ResultDefinition, 'name
     symbol: 'Ż',
     quantityKind: 'frequency',
     meaning: 'how many molecules strike the walls per time',
+  },
+  heat_flux: {
+    symbol: 'q',
+    quantityKind: 'heat_flux',
+    meaning: 'the heat per time and area through the gas; in a jacket, at the inner wall',
+  },
+  heat_flow: { symbol: 'Q̇', quantityKind: 'power', meaning: 'the heat per time from the hot wall to the cold one' },
+  conductivity: {
+    symbol: 'λ_eff',
+    quantityKind: 'thermal_conductivity',
+    meaning: 'the conductivity that a gas without jumps at the walls would need for the same heat',
+  },
+  jump_length_hot: {
+    symbol: 'g_h',
+    quantityKind: 'length',
+    meaning: 'the length of gas that resists as the jump of temperature at the hot wall does',
+  },
+  jump_length_cold: {
+    symbol: 'g_c',
+    quantityKind: 'length',
+    meaning: 'the length of gas that resists as the jump of temperature at the cold wall does',
+  },
+  free_molecular_heat_flow: {
+    quantityKind: 'power',
+    meaning: 'the heat flow if no molecule met another: the limit at low pressure',
+  },
+  continuum_heat_flow: {
+    quantityKind: 'power',
+    meaning: 'the heat flow by Fourier’s law, without jumps at the walls: the limit at high pressure',
   },
   throughput: {
     symbol: 'q',

@@ -1,3 +1,6 @@
+import { multiply } from '../arithmetic';
+import { plainNumber } from '../quantity';
+import { given, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { length, ofQuantity } from './kind';
 
@@ -16,6 +19,21 @@ export const gap: Kind = {
     { count: 1, of: ['area'] },
   ],
   hint: ['volume'],
-  later: ['volume', 'characteristic_length'],
+  later: [],
   snippet: 'gap ${1:name} { spacing = ${2:1 mm}, area = ${3:100 cm²} }',
+  compute: ({ inputs }) => {
+    const sizes = given(inputs, 'spacing', 'area');
+    if (!sizes) return undefined;
+    const { spacing, area } = sizes;
+    return passageRecord('gap', inputs, {
+      method: 'geometry of parallel plates, without their edges',
+      geometry: {
+        spacing,
+        area,
+        volume: multiply(spacing, area),
+        wall_area: multiply(plainNumber(2), area),
+        characteristic_length: spacing,
+      },
+    });
+  },
 };

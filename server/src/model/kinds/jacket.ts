@@ -1,3 +1,6 @@
+import { add, divide, multiply, subtract } from '../arithmetic';
+import { plainNumber, show } from '../quantity';
+import { given, mustBe, passageRecord } from './passageRecord';
 import type { Kind } from './kind';
 import { length } from './kind';
 
@@ -18,6 +21,30 @@ export const jacket: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['volume'],
-  later: ['volume', 'wall_area', 'characteristic_length'],
+  later: [],
   snippet: 'jacket ${1:name} { inner = ${2:60 mm}, outer = ${3:66 mm}, length = ${4:0.5 m} }',
+  compute: (declared, scope) => {
+    const { inputs } = declared;
+    const sizes = given(inputs, 'inner', 'outer', 'length');
+    if (!sizes) return undefined;
+    const { inner, outer, length: along } = sizes;
+    const bound = `below the outer diameter, ${show(outer)}`;
+    if (!mustBe(inner.si < outer.si, { key: 'inner', value: inner, bound }, declared, scope)) return undefined;
+    const perDiameter = multiply(plainNumber(Math.PI), along);
+    const walls = multiply(perDiameter, add(inner, outer));
+    const half = divide(subtract(outer, inner), plainNumber(2));
+    return passageRecord('jacket', inputs, {
+      method: 'geometry of coaxial cylinders, without their ends',
+      geometry: {
+        inner,
+        outer,
+        length: along,
+        volume: divide(multiply(walls, half), plainNumber(2)),
+        wall_area: walls,
+        inner_area: multiply(perDiameter, inner),
+        outer_area: multiply(perDiameter, outer),
+        characteristic_length: half,
+      },
+    });
+  },
 };
