@@ -11,15 +11,17 @@ const LAYERS: Readonly<Record<string, readonly string[]>> = {
   model: ['syntax', 'physics', 'quantities'],
   features: ['model', 'syntax', 'quantities'],
   report: ['features', 'model', 'syntax', 'quantities'],
+  // The reference book is compared with the engine itself. Only the command line has it, so that no server carries it.
+  verify: ['report', 'physics', 'quantities'],
   lsp: ['features', 'report', 'model', 'syntax', 'quantities'],
-  cli: ['lsp', 'features', 'report', 'model', 'syntax', 'quantities'],
+  cli: ['verify', 'lsp', 'features', 'report', 'model', 'syntax', 'quantities'],
   'node.ts': ['lsp'],
   'browser.ts': ['lsp'],
   'cli.ts': ['cli'],
 };
 
 /** The folders that run anywhere, a worker included. */
-const CORE = ['quantities', 'physics', 'syntax', 'model', 'features', 'report'];
+const CORE = ['quantities', 'physics', 'syntax', 'model', 'features', 'report', 'verify'];
 
 /**
  * The one knot of files that need each other when they run: an expression consists of expressions, so its forms call back to

@@ -2,46 +2,9 @@ import assert from 'node:assert/strict';
 import { speciesList } from '../../server/src/physics/species/list';
 import { viscosity } from '../../server/src/physics/transport/viscosity';
 import { figures, gas, valueOf, whole } from '../support/gases';
-import { references, withinStated } from '../support/reference';
 
 const micro = 1e6;
 const eta = (name: string, T: number) => micro * valueOf(viscosity(gas(name), T));
-
-/**
- * CRC Handbook, "Thermal conductivity of gases", mW/(m K), an edition before 2010. Two things in it have been superseded by
- * the reference correlations and are left out: nitrogen at 200 K (2.5 % above Lemmon & Jacobsen 2004) and methane but at
- * 300 K (Friend, Ely & Ingham 1989 is 4 % below it at 200 K and 5 % above it at 600 K).
- */
-const handbookConductivities: readonly (readonly [string, Readonly<Record<number, string>>, number])[] = [
-  ['air', { 200: '18.4', 300: '26.2', 400: '33.3', 500: '39.7', 600: '45.7' }, 0.02],
-  ['Ar', { 200: '12.4', 300: '17.9', 400: '22.6', 500: '26.8', 600: '30.6' }, 0.015],
-  ['H2', { 200: '131.7', 300: '186.9', 400: '230.4' }, 0.03],
-  ['SF6', { 300: '13.0', 400: '20.6', 500: '27.5', 600: '33.8' }, 0.1],
-  ['H2O', { 300: '18.7', 400: '27.1', 500: '35.7', 600: '47.1' }, 0.03],
-  ['NH3', { 300: '24.4', 400: '37.4', 500: '51.6', 600: '66.8' }, 0.03],
-  ['He', { 200: '119.3', 300: '156.7', 400: '190.6', 500: '222.3', 600: '252.4' }, 0.025],
-  ['Kr', { 200: '6.4', 300: '9.5', 400: '12.3', 500: '14.8', 600: '17.1' }, 0.015],
-  ['N2', { 300: '26.0', 400: '32.3', 500: '38.3', 600: '44.0' }, 0.02],
-  ['Ne', { 200: '37.6', 300: '49.8', 400: '60.3', 500: '69.9', 600: '78.7' }, 0.015],
-  ['O2', { 200: '18.4', 300: '26.3', 400: '33.7', 500: '41.0', 600: '48.1' }, 0.02],
-  ['Xe', { 300: '5.5', 400: '7.3', 500: '8.9', 600: '10.4' }, 0.02],
-  ['CO', { 300: '25.0', 400: '32.3', 500: '39.2', 600: '45.7' }, 0.1],
-  ['CO2', { 200: '9.6', 300: '16.8', 400: '25.1', 500: '33.5', 600: '41.6' }, 0.02],
-  ['CH4', { 300: '34.1' }, 0.03],
-];
-
-references(
-  'conductivity against the handbook',
-  handbookConductivities.flatMap(([name, row, error]) =>
-    Object.entries(row).map(([T, printed]) => ({
-      printed,
-      got: () => 1e3 * whole(figures(name, Number(T), 1e4), 'thermal_conductivity'),
-      source: 'CRC Handbook of Chemistry and Physics, Thermal Conductivity of Gases',
-      where: `${name}, ${T} K`,
-      within: withinStated(printed, error),
-    })),
-  ),
-);
 
 describe('conductivity', () => {
   it('of methane agrees with the equation of Friend, Ely & Ingham 1989 (constants from memory)', () => {

@@ -1,10 +1,8 @@
 import assert from 'node:assert/strict';
-import { pure } from '../../server/src/physics/composition';
 import { k, N_A, R } from '../../server/src/physics/constants';
 import { evaluateState } from '../../server/src/physics/state/evaluateState';
-import type { StateFigures } from '../../server/src/physics/state/evaluateState';
-import { atmosphere, figures, gas, mixture, part, request, whole } from '../support/gases';
-import { halfUnit, references } from '../support/reference';
+import { atmosphere, figures, mixture, part, request, whole } from '../support/gases';
+import { references } from '../support/reference';
 
 references('constants', [
   { printed: '1.380649e-23', got: () => k, source: 'CODATA 2018', where: 'Boltzmann constant, J/K, exact' },
@@ -14,108 +12,6 @@ references('constants', [
     got: () => R,
     source: 'CODATA 2018',
     where: 'molar gas constant, J/(mol K), exact, cut off',
-  },
-  {
-    printed: '2.686780111e25',
-    got: () => whole(figures('N2', 273.15, atmosphere), 'number_density'),
-    source: 'CODATA 2018',
-    where: 'Loschmidt constant (273.15 K, 101.325 kPa), 1/m³, exact, cut off',
-    within: { tolerance: 1e16, because: 'the list cuts the exact value off instead of rounding it' },
-  },
-]);
-
-/** The standard reckons with one molecule of 28.9644 g/mol and 3.65 Å. */
-function standardAir(temperature: number, pressure: number): StateFigures {
-  const air = { ...gas('air'), molarMass: { ...gas('air').molarMass, value: 28.9644e-3 } };
-  const composition = pure(air);
-  return evaluateState({ ...request(composition, temperature, pressure), collisionDiameter: 3.65e-10 });
-}
-
-const oldConstants = (printed: string) => ({
-  tolerance: halfUnit(printed) + 6e-5 * Number(printed),
-  because:
-    'the standard has the constants of 1969 (k is 2e-5 smaller), and prints temperature and pressure to five digits',
-});
-
-/** Geometric altitude in km, T in K, p in Pa, n in 1/m³, mean speed in m/s, collision frequency in 1/s, mean free path in m. */
-const standardAtmosphere: readonly (readonly [number, number, number, string, string, string, string, string])[] = [
-  [0, 288.15, 101325, '2.5470e25', '458.94', '6.9189e9', '6.6332e-8', 'table II'],
-  [20, 216.65, 5.5293e3, '1.8486e24', '397.95', '4.3543e8', '9.1393e-7', 'table II; from memory'],
-  [50, 270.65, 79.779, '2.1351e22', '444.79', '5.6211e6', '7.9130e-5', 'table II; from memory'],
-];
-
-references(
-  'U.S. Standard Atmosphere',
-  standardAtmosphere.flatMap(([altitude, T, p, density, speed, frequency, path, place]) => {
-    const state = () => standardAir(T, p);
-    return [
-      { printed: density, got: () => whole(state(), 'number_density') },
-      { printed: speed, got: () => whole(state(), 'mean_speed') },
-      { printed: frequency, got: () => whole(state(), 'collision_frequency') },
-      { printed: path, got: () => whole(state(), 'mean_free_path_hard_sphere') },
-    ].map((row) => ({
-      ...row,
-      source: 'U.S. Standard Atmosphere 1976',
-      where: `${place}, ${altitude} km`,
-      within: oldConstants(row.printed),
-    }));
-  }),
-);
-
-references('U.S. Standard Atmosphere, whole gas', [
-  {
-    printed: '340.29',
-    got: () => whole(standardAir(288.15, atmosphere), 'sound_speed'),
-    source: 'U.S. Standard Atmosphere 1976',
-    where: 'table III, 0 km',
-    within: { tolerance: 0.1, because: 'the standard takes γ = 1.4; the heat capacity of air makes it 1.4004' },
-  },
-  {
-    printed: '1.2250',
-    got: () => whole(standardAir(288.15, atmosphere), 'density'),
-    source: 'U.S. Standard Atmosphere 1976',
-    where: 'table I, 0 km',
-  },
-  {
-    printed: '1.7894e-5',
-    got: () => whole(standardAir(288.15, atmosphere), 'viscosity'),
-    source: 'U.S. Standard Atmosphere 1976',
-    where: 'table III, 0 km, by Sutherland’s formula',
-    within: { tolerance: 1.8e-7, because: 'an older formula; the viscosity of air states 1 %' },
-  },
-  {
-    printed: '2.5326e-2',
-    got: () => whole(standardAir(288.15, atmosphere), 'thermal_conductivity'),
-    source: 'U.S. Standard Atmosphere 1976',
-    where: 'table III, 0 km; from memory',
-    within: { tolerance: 5e-4, because: 'an older formula; the conductivity of air states 2 %' },
-  },
-]);
-
-/** The rate at 1 Pa, or 1 Torr, 1 K and 1 g/mol: that of nitrogen, scaled. */
-function ratePerPascal(): number {
-  const M = 1e3 * gas('N2').molarMass.value;
-  return whole(figures('N2', 300, 1), 'impingement_rate') * Math.sqrt(M * 300);
-}
-
-references('Hertz–Knudsen rate', [
-  {
-    printed: '2.635e24',
-    got: ratePerPascal,
-    source: 'handbooks of vacuum technique',
-    where: '2.635e24 p/√(MT) per m² and s, p in Pa, M in g/mol; from memory',
-  },
-  {
-    printed: '3.513e22',
-    got: () => (ratePerPascal() * (atmosphere / 760)) / 1e4,
-    source: 'handbooks of vacuum technique',
-    where: '3.513e22 p/√(MT) per cm² and s, p in Torr, M in g/mol; from memory',
-  },
-  {
-    printed: '145.5',
-    got: () => whole(figures('N2', 300, 1), 'mean_speed') * Math.sqrt((1e3 * gas('N2').molarMass.value) / 300),
-    source: 'CRC Handbook of Chemistry and Physics, Mean Free Path and Related Properties of Gases',
-    where: 'mean speed 145.5 √(T/M) m/s',
   },
 ]);
 

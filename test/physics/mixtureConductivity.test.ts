@@ -5,7 +5,6 @@ import { mixtureConductivity, translationalConductivity } from '../../server/src
 import type { Pairs } from '../../server/src/physics/transport/pairs';
 import { figures, gas, mixture, near, part, whole } from '../support/gases';
 import { masonSaxena } from '../support/masonSaxena';
-import { references } from '../support/reference';
 
 const conductivity = (parts: Readonly<Record<string, number>>, T: number) =>
   whole(figures(mixture(parts), T, 1e4), 'thermal_conductivity');
@@ -22,24 +21,6 @@ function rule(parts: Readonly<Record<string, number>>, T: number): number {
     })),
   );
 }
-
-/** Measurements at 0 °C, 10⁻⁷ cal/(cm s K), as collected by Hirschfelder, Curtiss & Bird 1954, section 8.4; from memory. */
-references(
-  'conductivity of mixtures at 0 °C',
-  (
-    [
-      ['He', 0.27, 'Ar', '730'],
-      ['He', 0.4539, 'Ar', '1061'],
-      ['H2', 0.39, 'N2', '1366'],
-    ] as const
-  ).map(([one, x, other, printed]) => ({
-    printed,
-    got: () => conductivity({ [one]: x, [other]: 1 - x }, 273.15) / 4.184e-5,
-    source: 'Hirschfelder, Curtiss & Bird 1954, section 8.4, after Wachsmuth 1908 and Ibbs & Hirst 1929',
-    where: `${one} ${x} in ${other}; from memory`,
-    within: { tolerance: 0.05 * Number(printed), because: 'hot-wire measurements of that time, and our own 5 %' },
-  })),
-);
 
 describe('the ratio B* of the 12-6 potential', () => {
   it('follows from Ω(1,1)* by the recurrence, with numerical slopes', () => {

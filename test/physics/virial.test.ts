@@ -4,91 +4,10 @@ import { fittedVirial, measuredVirial } from '../../server/src/physics/thermo/me
 import { correspondingOf, tsonopoulosVirial } from '../../server/src/physics/thermo/tsonopoulos';
 import { secondVirial } from '../../server/src/physics/thermo/virial';
 import { figures, gas, mixture, near, part, valueOf, whole } from '../support/gases';
-import { references } from '../support/reference';
 
 /** cm³/mol. */
 const B = (parts: Readonly<Record<string, number>>, T: number) =>
   1e6 * valueOf(secondVirial(mixture(parts), T)).coefficient;
-const cross = (one: string, other: string, T: number) =>
-  (4 * B({ [one]: 0.5, [other]: 0.5 }, T) - B({ [one]: 1 }, T) - B({ [other]: 1 }, T)) / 2;
-
-const within5 = { tolerance: 5, because: 'the accuracy we state for common gases near room temperature' };
-
-references(
-  'second virial coefficients at 300 K, cm³/mol',
-  (
-    [
-      ['N2', '-4.5'],
-      ['O2', '-16'],
-      ['Ar', '-15.5'],
-      ['Kr', '-50'],
-      ['Xe', '-129'],
-      ['CO', '-8'],
-      ['CO2', '-122.7'],
-      ['CH4', '-42.2'],
-      ['He', '11.8'],
-      ['Ne', '11.3'],
-      ['H2', '14.8'],
-      ['D2', '14'],
-      ['air', '-7.5'],
-      ['SF6', '-275'],
-    ] as const
-  ).map(([name, printed]) => ({
-    printed,
-    got: () => B({ [name]: 1 }, 300),
-    source: 'Dymond & Smith 1980, The Virial Coefficients of Pure Gases and Mixtures',
-    where: `${name}; from memory`,
-    within: within5,
-  })),
-);
-
-/** Where B is large, its own error decides. */
-references(
-  'second virial coefficients elsewhere, cm³/mol',
-  (
-    [
-      ['N2', 100, '-160', 0.05],
-      ['N2', 400, '9', 0.2],
-      ['Ar', 100, '-183.5', 0.08],
-      ['CO2', 220, '-247', 0.03],
-      ['H2O', 373.15, '-452', 0.03],
-      ['H2O', 500, '-175', 0.05],
-      ['NH3', 300, '-261', 0.05],
-      ['H2', 100, '-1.9', 1],
-      ['CH4', 150, '-182', 0.03],
-    ] as const
-  ).map(([name, T, printed, relative]) => ({
-    printed,
-    got: () => B({ [name]: 1 }, T),
-    source: 'Dymond & Smith 1980, The Virial Coefficients of Pure Gases and Mixtures',
-    where: `${name} at ${T} K; from memory`,
-    within: {
-      tolerance: Math.max(2, relative * Math.abs(Number(printed))),
-      because: 'the evaluations differ by as much from each other',
-    },
-  })),
-);
-
-references(
-  'cross virial coefficients at 300 K, cm³/mol',
-  (
-    [
-      ['N2', 'O2', '-11', 3],
-      ['N2', 'Ar', '-10', 3],
-      ['N2', 'CO2', '-41', 6],
-      ['N2', 'He', '21.5', 4],
-      ['N2', 'H2', '12.5', 4],
-      ['Ar', 'He', '17.5', 4],
-      ['CH4', 'CO2', '-66', 12],
-    ] as const
-  ).map(([one, other, printed, tolerance]) => ({
-    printed,
-    got: () => cross(one, other, 300),
-    source: 'Dymond & Smith 1980, The Virial Coefficients of Pure Gases and Mixtures',
-    where: `${one} and ${other}; from memory`,
-    within: { tolerance, because: 'the combining rules are known to be good to some 5 to 10 cm³/mol' },
-  })),
-);
 
 describe('second virial coefficients', () => {
   const known = speciesList.filter((species) => correspondingOf(species, 300) !== undefined);

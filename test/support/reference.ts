@@ -1,6 +1,10 @@
 import assert from 'node:assert/strict';
+import type { Tolerance } from '../../server/src/verify/row';
+import { halfUnit } from '../../server/src/verify/row';
 
-/** A value as a published source prints it, beside ours. */
+export { halfUnit };
+
+/** A value as a published source prints it, beside ours: of a function inside the program. Those of a gas stand in `server/src/verify/book`. */
 export interface ReferenceRow {
   /** Copied as printed, in the unit in which it is printed. Its last digit sets the tolerance. */
   readonly printed: string;
@@ -14,11 +18,6 @@ export interface ReferenceRow {
   readonly within?: Tolerance;
 }
 
-export interface Tolerance {
-  readonly tolerance: number;
-  readonly because: string;
-}
-
 /** One test for each row: ours must be the printed value, to half a unit of its last digit or within the stated tolerance. */
 export function references(title: string, rows: readonly ReferenceRow[]): void {
   describe(title, () => {
@@ -28,21 +27,6 @@ export function references(title: string, rows: readonly ReferenceRow[]): void {
       });
     }
   });
-}
-
-/** Half a unit of the last printed digit: 5e-9 of `1.781e-5`. */
-export function halfUnit(printed: string): number {
-  const [mantissa = '', exponent = '0'] = printed.toLowerCase().split('e');
-  const decimals = mantissa.includes('.') ? mantissa.length - mantissa.indexOf('.') - 1 : 0;
-  return 0.5 * 10 ** (Number(exponent) - decimals);
-}
-
-/** The tolerance of a value that was measured by others: their last digit, and the error that we state. */
-export function withinStated(printed: string, relative: number): Tolerance {
-  return {
-    tolerance: halfUnit(printed) + relative * Number(printed),
-    because: 'the source is independent of our correlation, whose stated error must cover the difference',
-  };
 }
 
 function check({ printed, got, within }: ReferenceRow): void {

@@ -5,9 +5,10 @@ import { UsageError } from './command';
 import { explain } from './explain';
 import { format } from './format';
 import { serve } from './serve';
+import { verify } from './verify';
 import { VERSION } from './version';
 
-const commands: readonly Command[] = [check, format, explain, serve];
+const commands: readonly Command[] = [check, format, explain, verify, serve];
 
 /** Exit codes: 0 all is well, 1 something fails, 2 bad usage or unreadable input, 3 a fault of our own. */
 export async function run(args: readonly string[]): Promise<number> {
