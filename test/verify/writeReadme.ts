@@ -1,0 +1,4 @@
+import { writeFileSync } from 'node:fs';
+import { README, readmeTexts } from './readmeTable';
+
+writeFileSync(README, readmeTexts().due);
