@@ -136,6 +136,37 @@ const meanings: Readonly<{ [name: string]: string | Omit<ResultDefinition, 'name
     quantityKind: 'power',
     meaning: 'the heat flow by Fourier’s law, without jumps at the walls: the limit at high pressure',
   },
+  conductance: {
+    symbol: 'C',
+    quantityKind: 'conductance',
+    meaning: 'throughput per pressure difference, for small differences about this pressure',
+  },
+  poiseuille_coefficient: {
+    symbol: 'G_P',
+    quantityKind: 'number',
+    meaning: 'the reduced flow that a pressure gradient drives',
+  },
+  thermal_creep_coefficient: {
+    symbol: 'G_T',
+    quantityKind: 'number',
+    meaning: 'the reduced flow that a temperature gradient drives, towards the hot end',
+  },
+  slip_factor: {
+    symbol: 'C_c',
+    quantityKind: 'number',
+    meaning: 'how many times less the drag is than by Stokes’ law (Cunningham)',
+  },
+  relaxation_time: {
+    symbol: 'τ',
+    quantityKind: 'time',
+    meaning: 'how long the particle takes to take on the motion of the gas',
+  },
+  settling_speed: { symbol: 'v_s', quantityKind: 'speed', meaning: 'the steady speed of its fall' },
+  stopping_distance: {
+    symbol: 's',
+    quantityKind: 'length',
+    meaning: 'how far it gets into gas at rest at the speed of the state',
+  },
   throughput: {
     symbol: 'q',
     quantityKind: 'throughput',

@@ -3,21 +3,17 @@ import { divide, multiply } from '../arithmetic';
 import { figure, figures } from '../figures';
 import { plainNumber, quantity } from '../quantity';
 import type { Scope } from '../scope';
-import type { Figure, Members, Provenance, Quantity, Record } from '../values';
+import type { Members, Provenance, Quantity, Record } from '../values';
 import { wrongType } from '../problems/wrongType';
 import { regimeOf, regimes } from '../regime';
+import { quantityOf } from './siteMembers';
+import { particleMembers } from './siteParticle';
+import { passageMembers } from './sitePassage';
 
 /** The results that a site has or will have, for completion and for what is not computed yet. */
 export const siteResults = {
   hint: ['knudsen', 'regime'],
-  later: [
-    'conductance',
-    'poiseuille_coefficient',
-    'thermal_creep_coefficient',
-    'slip_factor',
-    'settling_speed',
-    'stopping_distance',
-  ],
+  later: ['conductance', 'poiseuille_coefficient', 'thermal_creep_coefficient'],
 } as const;
 
 /** A gas at rest in a place: its Knudsen number on the place's characteristic length, and what follows from it. */
@@ -46,9 +42,11 @@ export function computeSite(state: Record, geometry: Record, span: Span, scope: 
     method: `Kn = λ/ℓ on the ${sizeName(geometry)}; λ: ${path.provenance.method}`,
   };
   const kn = { ...quantity(knudsen.si, knudsen.dimension, knudsen.leans), quantityKind: 'number' };
+  const delta = rarefaction(kn, geometry);
+  const around = geometry.word === 'particle';
   const members: Members = new Map([
     ['knudsen', figure(kn, provenance)],
-    ['rarefaction', rarefaction(kn, geometry, provenance)],
+    ['rarefaction', figure(delta, { ...provenance, method: `δ = (√π/2)·a/λ, on the ${rarefactionSize(geometry)}` })],
     [
       'regime',
       figure(
@@ -59,20 +57,25 @@ export function computeSite(state: Record, geometry: Record, span: Span, scope: 
         },
       ),
     ],
-    ...contents(state, geometry),
+    ...(around ? particleMembers(state, geometry) : passageMembers(state, geometry, delta)),
+    ...(around ? [] : contents(state, geometry)),
   ]);
   return record(state, members);
 }
 
-/** δ = (√π/2) a/λ, with the radius of a round passage or the gap between plates as a. */
-function rarefaction(knudsen: Quantity, geometry: Record, provenance: Provenance): Figure {
-  const half = geometry.word === 'tube' || geometry.word === 'orifice' ? 2 : 1;
+/** δ = (√π/2) a/λ, with the radius of a round thing or the gap between plates as a. */
+function rarefaction(knudsen: Quantity, geometry: Record): Quantity {
+  const half = isRound(geometry) ? 2 : 1;
   const delta = divide(plainNumber(Math.sqrt(Math.PI) / 2 / half), knudsen);
-  const from = half === 2 ? 'the radius' : 'the characteristic length';
-  return figure(
-    { ...quantity(delta.si, delta.dimension, delta.leans), quantityKind: 'number' },
-    { ...provenance, method: `δ = (√π/2)·a/λ, on ${from}` },
-  );
+  return { ...quantity(delta.si, delta.dimension, delta.leans), quantityKind: 'number' };
+}
+
+function rarefactionSize(geometry: Record): string {
+  return isRound(geometry) ? 'radius' : 'characteristic length';
+}
+
+function isRound({ word }: Record): boolean {
+  return ['tube', 'orifice', 'particle'].includes(word);
 }
 
 /** N = nV and Ż = (n c̄/4) S */
@@ -100,11 +103,7 @@ function record(state: Record, members: Members): Record {
   };
 }
 
-function sizeName(geometry: Record): string {
-  return geometry.word === 'tube' || geometry.word === 'orifice' ? 'bore' : 'characteristic length';
-}
-
-function quantityOf(members: Members, name: string): Quantity | undefined {
-  const found = members.get(name);
-  return found?.kind === 'figure' && found.value.kind === 'quantity' ? found.value : undefined;
+function sizeName({ word }: Record): string {
+  if (word === 'particle') return 'diameter';
+  return word === 'tube' || word === 'orifice' ? 'bore' : 'characteristic length';
 }

@@ -1,5 +1,6 @@
 import type { Outcome } from '../outcome';
 import { failure, success } from '../outcome';
+import type { SourceId } from '../sources';
 import type { Section } from './kineticSolution';
 import {
   accommodationRoots,
@@ -25,6 +26,9 @@ export interface KineticCoefficients {
   /** What G_P is more than by Poiseuille's law: the share of slip and of free flight. */
   readonly beyondViscous: number;
 }
+
+/** Where the equation and the definitions come from. The tables are our own. */
+export const kineticSources: readonly SourceId[] = ['Shakhov 1968', 'Sharipov & Seleznev 1998'];
 
 /**
  * For any rarefaction δ > 0 and diffuse–specular walls, from the tables of the linearised kinetic equation with the collision
@@ -124,3 +128,24 @@ function splines(section: Section): Splines {
   prepared.set(section, made);
   return made;
 }
+
+/** What the gas consists of, as far as the model of its collisions depends on it. */
+export type Molecules = 'atoms' | 'molecules' | 'mixture';
+
+/**
+ * The relative errors, 95 %, of the collision model; our judgement from how far the slip coefficients of the Boltzmann equation
+ * for rigid spheres lie from those of the model. Where no molecule meets another, and in Poiseuille's law, there is none. Heat
+ * that molecules carry inside drives no creep, which the model does not know.
+ */
+export function kineticErrors({ poiseuille, beyondViscous }: KineticCoefficients, delta: number, of: Molecules) {
+  const collisions = delta / (1 + delta);
+  const creep = { atoms: 0.05, molecules: 0.15, mixture: 0.2 }[of];
+  const slip = of === 'mixture' ? 0.06 : 0.03;
+  return {
+    poiseuille: NUMERICAL + slip * collisions * (beyondViscous / poiseuille),
+    thermalCreep: NUMERICAL + creep * collisions,
+  };
+}
+
+/** Of the solution and its interpolation. */
+const NUMERICAL = 5e-4;
