@@ -6,6 +6,7 @@ import { speciesByName } from '../../server/src/physics/species/list';
 import { solveState } from '../../server/src/physics/state/closure';
 import { evaluateState } from '../../server/src/physics/state/evaluateState';
 import { createParser } from '../../server/src/syntax/parse';
+import { againstC } from './againstC';
 import { record } from './record';
 
 // What things cost against each other. Seconds depend on the machine; ratios tell whether cost follows the change.
@@ -65,6 +66,8 @@ ratio(
   'all figures of a state of five species',
   'all figures of a state of a pure gas',
 );
+
+againstC();
 
 function workspaceOf(text: () => string) {
   return createWorkspace({ read: () => ({ text: text() }), resolve: (_from, path) => path });
