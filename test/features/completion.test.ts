@@ -132,7 +132,7 @@ describe('completion of a unit', () => {
     assert.equal(item('state s of N2 { pressure = 3 <*> }', 'Torr').detail, '400.0 Pa');
     assert.equal(item('display pressure in Torr\nstate s of N2 { pressure = 1 <*> }', 'atm').detail, '760.0 Torr');
     // 0 °C is 273.15 K (SI Brochure, 2.3.1), with the sign counted in.
-    assert.equal(item('state s of N2 { temperature = -10 <*> }', '°C').detail, '263.1 K');
+    assert.equal(item('state s of N2 { temperature = -10 <*> }', '°C').detail, '263.2 K');
   });
 
   it('replaces the unit begun, and puts the space where there is none', () => {

@@ -1,4 +1,4 @@
-import type { File, Item } from '../syntax/nodes';
+import type { File, Item, Name } from '../syntax/nodes';
 import { MOST_SHOWN, roundFrom } from './circle';
 import type { Declared } from './declare';
 import type { Document, Shape } from './document';
@@ -75,14 +75,25 @@ function allProblems(
   });
 }
 
-function duplicate(document: Document, { name }: Declared): readonly Problem[] {
-  const same = name ? (document.declarations.byName.get(name.text) ?? []) : [];
-  if (!name || same.length < 2) return [];
-  const related = same
+function duplicate(document: Document, declared: Declared): readonly Problem[] {
+  const { name, others } = namesakes(document, declared);
+  if (!name || others.length === 0) return [];
+  const related = others
     .slice(0, MOST_SHOWN)
-    .filter((other) => other.name !== name)
     .map((other) => relatedTo({ document, declared: other }, 'declared here as well'));
   return [duplicateName.at(name.span, { name: name.text }, { related })];
+}
+
+/** The other declarations of the same name, or of the same condition. */
+function namesakes({ declarations }: Document, declared: Declared): { name?: Name; others: readonly Declared[] } {
+  const { declaration } = declared.item;
+  if (declared.name) {
+    const same = declarations.byName.get(declared.name.text) ?? [];
+    return { name: declared.name, others: same.filter((other) => other !== declared) };
+  }
+  if (declaration.kind !== 'assume' || declaration.name.kind !== 'name') return { others: [] };
+  const first = declarations.assumed.get(declaration.name.text);
+  return { name: declaration.name, others: first && first !== declared ? [first] : [] };
 }
 
 function circular(place: Place, evaluation: Evaluation): readonly Problem[] {

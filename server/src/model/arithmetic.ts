@@ -8,15 +8,14 @@ import type { Quantity } from './values';
 /** Arithmetic of quantities whose dimensions have been found to fit. Each result carries the leans of its operands to first order. */
 
 export function add(a: Quantity, b: Quantity): Quantity {
-  return { ...shaped(a, b), si: a.si + b.si, leans: combine(1, a.leans, 1, b.leans) };
+  const shape = isPoint(b) && !isPoint(a) ? shaped(b, a) : shaped(a, b);
+  return { ...shape, si: a.si + b.si, leans: combine(1, a.leans, 1, b.leans) };
 }
 
-/** A difference of two temperatures on a scale is no longer on it, and is shown in kelvin. */
+/** What is left of a temperature when another is subtracted is a difference, no longer a point on a scale. */
 export function subtract(a: Quantity, b: Quantity): Quantity {
-  const result = { ...shaped(a, b), si: a.si - b.si, leans: combine(1, a.leans, -1, b.leans) };
-  if (a.unit?.kind !== 'offset' || b.unit?.kind !== 'offset') return result;
-  const { unit: _unit, ...plain } = result;
-  return { ...plain, quantityKind: 'temperature_difference' };
+  const result: Quantity = { ...shaped(a, b), si: a.si - b.si, leans: combine(1, a.leans, -1, b.leans) };
+  return isPoint(b) || (isPoint(a) && result.si <= 0) ? asDifference(result) : result;
 }
 
 export function multiply(a: Quantity, b: Quantity): Quantity {
@@ -55,7 +54,18 @@ export function power(base: Quantity, exponent: Quantity): Quantity {
 }
 
 export function negate(a: Quantity): Quantity {
-  return { ...a, si: -a.si, leans: scale(-1, a.leans) };
+  const result: Quantity = { ...a, si: -a.si, leans: scale(-1, a.leans) };
+  return isPoint(a) ? asDifference(result) : result;
+}
+
+/** Whether it is a temperature on a scale, as against a difference of two. Kelvins alone do not tell. */
+function isPoint({ unit, quantityKind }: Quantity): boolean {
+  return unit?.kind === 'offset' || quantityKind === 'temperature';
+}
+
+function asDifference({ unit, ...rest }: Quantity): Quantity {
+  const kept = unit && unit.kind !== 'offset' ? { unit } : {};
+  return { ...rest, ...kept, quantityKind: 'temperature_difference' };
 }
 
 /** A function of one quantity, with its derivative there. */

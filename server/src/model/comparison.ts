@@ -1,14 +1,18 @@
-import { dimensionless } from '../quantities/dimension';
 import { nearestNames } from '../quantities/nearestNames';
 import { describeDimension } from '../quantities/quantityKinds';
 import type { Between, Comparison, Expression, Is, Logic, Unary, Within } from '../syntax/nodes';
-import { map, multiply, negate, subtract } from './arithmetic';
+import { negate, subtract } from './arithmetic';
 import { describeValue, evaluate, evaluateQuantity } from './expression';
+import { offsetLiteral } from './literal';
 import { mismatch } from './mismatch';
+import { ambiguousTemperature } from './problems/ambiguousTemperature';
+import { contradictoryInput } from './problems/contradictoryInput';
 import { unknownName } from './problems/unknownName';
 import { wrongType } from './problems/wrongType';
+import { show } from './quantity';
 import type { Scope } from './scope';
 import { exact, halfWidth } from './tolerance';
+import { readHalfWidth } from './toleranced';
 import type { Quantity, Side, Verdict } from './values';
 
 /**
@@ -36,27 +40,14 @@ export function evaluateComparison(node: Comparison, scope: Scope): Verdict | un
     case '==':
       return equality(node, left, right, shown);
     case '!=':
-      return not(equality(node, left, right, shown));
+      return opposite(equality(node, left, right, shown));
   }
 }
 
 export function evaluateWithin(node: Within, scope: Scope): Verdict | undefined {
-  const values = evaluateAlike([node.target, node.value], scope);
-  const width = evaluateQuantity(node.halfWidth, scope, 'within');
-  const [target, value] = values ?? [];
-  if (!target || !value || !width) return undefined;
-  const relative =
-    width.dimension === dimensionless && target.dimension !== dimensionless ? true : width.unit?.text === '%';
-  const allowed = relative ? multiply(width, map(target, Math.abs(target.si), Math.sign(target.si))) : width;
-  if (allowed.dimension !== value.dimension) {
-    mismatch(
-      node.halfWidth,
-      width,
-      { subject: 'the half-width', dimension: value.dimension, wants: describeDimension(value.dimension) },
-      scope,
-    );
-    return undefined;
-  }
+  const [target, value] = evaluateAlike([node.target, node.value], scope) ?? [];
+  const allowed = target && readHalfWidth(node.halfWidth, { node: node.target, value: target }, scope);
+  if (!value || !allowed) return undefined;
   const distance = subtract(value, target);
   const size = distance.si < 0 ? negate(distance) : distance;
   return verdict(node, subtract(allowed, size), allowed, [side('', value), side('of ', target)], { strict: false });
@@ -65,6 +56,11 @@ export function evaluateWithin(node: Within, scope: Scope): Verdict | undefined 
 export function evaluateBetween(node: Between, scope: Scope): Verdict | undefined {
   const [value, low, high] = evaluateAlike([node.value, node.low, node.high], scope) ?? [];
   if (!value || !low || !high) return undefined;
+  if (low.si > high.si) {
+    const why = `the bounds are the wrong way round: ${show(low)} is above ${show(high)}`;
+    scope.report(contradictoryInput.at({ start: node.low.span.start, end: node.high.span.end }, { why }));
+    return undefined;
+  }
   const shown = [side('', value), side('from ', low), side('to ', high)];
   const width = subtract(high, low);
   const above = verdict(node, subtract(value, low), width, shown, { strict: false });
@@ -123,8 +119,10 @@ function evaluateAlike(nodes: readonly Expression[], scope: Scope): readonly Qua
   for (const [index, value] of values.entries()) {
     const node = nodes[index];
     if (!first || !value || !node) continue;
-    if (value.dimension === first.dimension) known.push(value);
-    else
+    if (value.dimension === first.dimension) {
+      if (isMistaken(node, values)) reportPoint(node, value, scope);
+      else known.push(value);
+    } else
       mismatch(
         node,
         value,
@@ -133,6 +131,16 @@ function evaluateAlike(nodes: readonly Expression[], scope: Scope): readonly Qua
       );
   }
   return known.length === nodes.length ? known : undefined;
+}
+
+/** A difference of temperatures is compared with a difference: 50 °C would be 323 K. */
+function isMistaken(node: Expression, values: readonly (Quantity | undefined)[]): boolean {
+  return offsetLiteral(node) !== undefined && values.some((value) => value?.quantityKind === 'temperature_difference');
+}
+
+function reportPoint(node: Expression, value: Quantity, scope: Scope): void {
+  const why = 'is a temperature on a scale, but the other side is a difference of temperatures; write it in K';
+  scope.report(ambiguousTemperature.at(node.span, { written: show(value), why, readings: [] }));
 }
 
 /** Equal within rounding. Where the difference is uncertain and reaches zero, nobody can tell. */
@@ -192,15 +200,15 @@ function both(a: Verdict, b: Verdict): Verdict {
 
 const RANK = { fails: 0, undecided: 1, holds: 2 } as const;
 
+/** The opposite, said as “not”. */
 function not(a: Verdict): Verdict {
+  return { ...opposite(a), negated: !a.negated };
+}
+
+/** The opposite, where the condition itself says so, as `!=` does. */
+function opposite(a: Verdict): Verdict {
   const status = a.status === 'undecided' ? 'undecided' : a.status === 'holds' ? 'fails' : 'holds';
-  return {
-    ...a,
-    status,
-    holds: !a.holds,
-    negated: !a.negated,
-    ...(a.margin === undefined ? {} : { margin: -a.margin }),
-  };
+  return { ...a, status, holds: !a.holds, ...(a.margin === undefined ? {} : { margin: -a.margin }) };
 }
 
 function side(text: string, value: Quantity): Side {

@@ -48,8 +48,10 @@ export function createEvaluation(sight: Sight): Evaluation {
   const names = new Map<Document, string>();
   const ran: string[] = [];
 
-  const find = (document: Document, name: string): Place | undefined => {
+  const find = (document: Document, name: string, reader?: Declared): Place | undefined => {
     const [own] = document.declarations.byName.get(name) ?? [];
+    // A state may bear the name of its gas: in it the name means the gas.
+    if (own && own === reader && builtInGas(name)) return undefined;
     if (own) return { document, declared: own };
     for (const { uri } of document.uses) {
       const other = sight.document(uri);
@@ -89,10 +91,11 @@ export function createEvaluation(sight: Sight): Evaluation {
     for (const place of order) evaluated(place);
   };
 
-  const remembered = ({ document, declared }: Place): Evaluated | undefined => {
+  const remembered = (place: Place): Evaluated | undefined => {
+    const { document, declared } = place;
     const entry = document.memo.get(declared.id);
     if (!entry || entry.text !== declared.item.text) return undefined;
-    return entry.reads.every(({ key, seen }) => look(document, key) === seen) ? entry : undefined;
+    return entry.reads.every(({ key, seen }) => look(place, key) === seen) ? entry : undefined;
   };
 
   const run = (place: Place): Evaluated => {
@@ -100,7 +103,7 @@ export function createEvaluation(sight: Sight): Evaluation {
     ran.push(declared.id);
     const reads = new Map<string, Read>();
     const read = (key: string): unknown => {
-      const seen = look(document, key);
+      const seen = look(place, key);
       reads.set(key, { key, seen });
       return seen;
     };
@@ -115,16 +118,16 @@ export function createEvaluation(sight: Sight): Evaluation {
   };
 
   /** What there is to see under a key now. */
-  const look = (document: Document, key: string): unknown => {
+  const look = ({ document, declared }: Place, key: string): unknown => {
     const [sort, name] = splitKey(key);
     switch (sort) {
       case 'name': {
-        const target = find(document, name);
+        const target = find(document, name, declared);
         return target ? evaluated(target).outcome : builtInGas(name);
       }
       case 'assume': {
-        const declared = document.declarations.assumed.get(name);
-        return declared && evaluated({ document, declared }).outcome;
+        const condition = document.declarations.assumed.get(name);
+        return condition && evaluated({ document, declared: condition }).outcome;
       }
       case 'file': {
         const uri = document.uses.find(({ path }) => path === name)?.uri;
@@ -170,7 +173,7 @@ export function createEvaluation(sight: Sight): Evaluation {
     find,
     ran,
     circleOf: ({ declared }) => circles.get(declared),
-    scope: (place, report) => scopeOf(place, (key) => look(place.document, key), report),
+    scope: (place, report) => scopeOf(place, (key) => look(place, key), report),
   };
 }
 

@@ -52,7 +52,8 @@ export const functions: readonly FunctionDefinition[] = [
     meaning: 'the size without the sign',
     arity: [1, 1],
     takes: 'any',
-    compute: (x) => map(x, Math.abs(x.si), Math.sign(x.si)),
+    // At zero either direction leads away from it.
+    compute: (x) => map(x, Math.abs(x.si), x.si < 0 ? -1 : 1),
   },
   {
     name: 'min',

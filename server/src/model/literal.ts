@@ -100,7 +100,7 @@ function readOffset(span: Span, value: number, unit: Unit, scope: Scope): Quanti
     scope.report(absoluteZero.at(span, { subject: 'the temperature', value: `${String(value)} ${unit.text}` }));
     return undefined;
   }
-  return { ...quantity(si, unit.dimension), unit };
+  return { ...quantity(si, unit.dimension), unit, quantityKind: 'temperature' };
 }
 
 /** A difference is shown in its unit only where that has no zero of its own. */

@@ -36,7 +36,10 @@ export function evaluateRequirement(
 
 /** `bleed.conductance is 12.3 L/s; wanted >= 20 L/s`. Of a compound condition the part that decides is told. */
 export function describeVerdict(verdict: Verdict, condition: Expression, text: string, display: DisplayUnits): string {
-  const relation = relationAt(condition, verdict) ?? condition;
+  const relation = relationAt(condition, verdict);
+  const values = verdict.sides.map((side) => (side.value ? showWithTolerance(side.value, { display }) : side.text));
+  // The condition stands in another declaration.
+  if (!relation) return `${text.slice(condition.span.start, condition.span.end)} does not hold (${values.join(', ')})`;
   const [left, ...rest] = verdict.sides;
   const first = leftOf(relation);
   const subject = text.slice(first.span.start, first.span.end);
@@ -47,8 +50,13 @@ export function describeVerdict(verdict: Verdict, condition: Expression, text: s
   const value = left?.value ? showWithTolerance(left.value, { display }) : (left?.text ?? '');
   const limits = rest.flatMap((side) => (side.value ? [showWithTolerance(side.value, { display })] : []));
   const explained = limits.length > 0 && namesSomething(relation, first) ? ` (${limits.join(', ')})` : '';
-  const is = first.kind === 'number' ? '' : `${subject} is `;
   const not = verdict.negated ? 'not ' : '';
+  if (first.kind === 'number' && relation.kind === 'comparison' && relation.right.kind !== 'number') {
+    // `12 mm < bore` is about the bore.
+    const about = text.slice(relation.right.span.start, relation.right.span.end);
+    return `${about} is ${values[1] ?? ''}; wanted ${not}${text.slice(first.span.start, relation.span.end)}`;
+  }
+  const is = first.kind === 'number' ? '' : `${subject} is `;
   return `${is}${value}; wanted ${not}${wanted}${explained}`;
 }
 

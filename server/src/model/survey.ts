@@ -11,7 +11,7 @@ export interface Survey {
 }
 
 /** Where a name that stands in a document is declared. */
-export type Find = (document: Document, name: string) => Place | undefined;
+export type Find = (document: Document, name: string, reader?: Declared) => Place | undefined;
 
 export function survey(document: Document, find: Find): Survey {
   return document.uses.length === 0 ? surveyAlone(document, find) : surveyAll(document, find);
@@ -50,7 +50,7 @@ function surveyAll(document: Document, find: Find): Survey {
   const successors = (declared: Declared): readonly Declared[] => {
     const own = places.get(declared)?.document ?? document;
     return references(declared.item.declaration).flatMap(({ text }) => {
-      const target = find(own, text);
+      const target = find(own, text, declared);
       if (!target) return [];
       if (!places.has(target.declared)) places.set(target.declared, target);
       return [target.declared];

@@ -2,8 +2,9 @@ import { dimensionless } from '../quantities/dimension';
 import { describeDimension } from '../quantities/quantityKinds';
 import { formatNumber } from '../quantities/format';
 import type { Expression, Tolerance } from '../syntax/nodes';
+import { map, multiply } from './arithmetic';
 import { evaluate, evaluateQuantity } from './expression';
-import { offsetLiteral, readLiteral } from './literal';
+import { gaugeLiteral, offsetLiteral, readLiteral } from './literal';
 import { mismatch } from './mismatch';
 import { ambiguousTemperature } from './problems/ambiguousTemperature';
 import { missingUnit } from './problems/missingUnit';
@@ -25,7 +26,6 @@ export function evaluateTolerance(
   readValue: (value: Expression) => Value | undefined = (value) => evaluate(value, scope),
 ): Quantity | undefined {
   const value = readValue(node.value);
-  const width = readWidth(node.halfWidth, scope);
   if (value === undefined) return undefined;
   if (value.kind !== 'quantity') {
     scope.report(
@@ -33,49 +33,68 @@ export function evaluateTolerance(
     );
     return undefined;
   }
-  const amount = width && halfWidthOf(node, value, width, scope);
-  if (amount === undefined) return undefined;
-  return { ...value, leans: combine(1, value.leans, 1, leanOn(scope.causeOf(node), amount)) };
+  const width = readHalfWidth(node.halfWidth, { node: node.value, value }, scope);
+  if (!width) return undefined;
+  return { ...value, leans: combine(1, value.leans, 1, leanOn(scope.causeOf(node), width.si)) };
 }
 
-function readWidth(node: Expression, scope: Scope): Quantity | undefined {
-  const literal = offsetLiteral(node);
-  return literal ? readLiteral(literal, scope, 'difference') : evaluateQuantity(node, scope, 'a tolerance');
+/** What a half-width is taken of. */
+interface Middle {
+  readonly node: Expression;
+  readonly value: Quantity;
 }
 
-function halfWidthOf(node: Tolerance, value: Quantity, width: Quantity, scope: Scope): number | undefined {
+/**
+ * A half-width in the dimension of what it is taken of. One in percent is relative, unless the value is written in percent
+ * itself. Readings on a scale, in °C or barg, count as differences.
+ */
+export function readHalfWidth(node: Expression, middle: Middle, scope: Scope): Quantity | undefined {
+  const width = readWidth(node, scope);
+  if (!width) return undefined;
+  const { value } = middle;
   if (width.si < 0) {
-    scope.report(
-      outOfBounds.at(node.halfWidth.span, { subject: 'a half-width', value: show(width), bound: 'zero or more' }),
-    );
+    scope.report(outOfBounds.at(node.span, { subject: 'a half-width', value: show(width), bound: 'zero or more' }));
     return undefined;
   }
   const relative =
     width.dimension === dimensionless && width.unit !== undefined && value.unit?.dimension !== dimensionless;
   if (relative && value.unit?.kind === 'offset') {
-    const kelvin = `${formatNumber(Math.abs(value.si) * width.si, 2)} K`;
-    const readings = [replacement(node.halfWidth.span, kelvin, `Write ± ${kelvin}`)];
-    const why = `of a temperature in ${value.unit.text} may be meant of the reading or of the kelvins; write the half-width in K`;
-    scope.report(
-      ambiguousTemperature.at(node.halfWidth.span, {
-        written: `± ${String(Number((100 * width.si).toPrecision(4)))} %`,
-        why,
-        readings,
-      }),
-    );
+    reportRelative(node, width, value, value.unit.text, scope);
     return undefined;
   }
-  if (relative) return Math.abs(value.si) * width.si;
-  if (width.dimension === value.dimension) return width.si;
-  const { dimension } = value;
+  if (relative) return multiply(width, map(value, Math.abs(value.si), Math.sign(value.si)));
+  if (width.dimension === value.dimension) return width;
+  reportMismatch(node, width, middle, scope);
+  return undefined;
+}
+
+function readWidth(node: Expression, scope: Scope): Quantity | undefined {
+  const literal = offsetLiteral(node) ?? gaugeLiteral(node);
+  if (literal) return readLiteral(literal, scope, 'difference');
+  const width = evaluateQuantity(node, scope, 'a tolerance');
+  if (width?.unit?.kind !== 'offset') return width;
+  const why = 'is a temperature on a scale; a half-width is a difference, in K';
+  scope.report(ambiguousTemperature.at(node.span, { written: show(width), why, readings: [] }));
+  return undefined;
+}
+
+function reportRelative(node: Expression, width: Quantity, value: Quantity, unit: string, scope: Scope): void {
+  const kelvin = `${formatNumber(Math.abs(value.si) * width.si, 2)} K`;
+  const readings = [replacement(node.span, kelvin, `Write ${kelvin}`)];
+  const why = `of a temperature in ${unit} may be meant of the reading or of the kelvins; write the half-width in K`;
+  const written = `${String(Number((100 * width.si).toPrecision(4)))} %`;
+  scope.report(ambiguousTemperature.at(node.span, { written, why, readings }));
+}
+
+function reportMismatch(node: Expression, width: Quantity, middle: Middle, scope: Scope): void {
   const unit = width.unit?.text;
-  if (node.value.kind === 'number' && !node.value.unit && unit !== undefined) {
+  if (middle.node.kind === 'number' && !middle.node.unit && unit !== undefined) {
     // `100 ± 4 Pa` is how data sheets write it.
-    const { span, text } = node.value;
+    const { span, text } = middle.node;
     const wants = describeDimension(width.dimension);
     scope.report(missingUnit.at(span, { subject: 'the half-width', wants, digits: text, units: [unit] }));
-    return undefined;
+    return;
   }
-  mismatch(node.halfWidth, width, { subject: 'the half-width', dimension, wants: describeDimension(dimension) }, scope);
-  return undefined;
+  const { dimension } = middle.value;
+  mismatch(node, width, { subject: 'the half-width', dimension, wants: describeDimension(dimension) }, scope);
 }

@@ -15,9 +15,11 @@ const noNumber = '–';
 export function formatNumber(value: number, digits: number): string {
   if (!Number.isFinite(value)) return noNumber;
   if (value === 0) return '0';
-  const rounded = Number(value.toPrecision(digits));
+  // 293.15 is not quite 293.15 in binary, and yet rounds up.
+  const nudged = Math.abs(value) < 1e300 ? value * (1 + 2 ** -50) : value;
+  const rounded = Number(nudged.toPrecision(digits));
   if (!(Math.abs(rounded) >= 1e-3 && Math.abs(rounded) < 1e5))
-    return withShortExponent(value.toExponential(digits - 1));
+    return withShortExponent(nudged.toExponential(digits - 1));
   return fixed(rounded, digits - 1 - decade(rounded));
 }
 
