@@ -1,4 +1,6 @@
 import assert from 'node:assert/strict';
+import { pure } from '../../server/src/physics/composition';
+import { statedSpecies } from '../../server/src/physics/species/statedSpecies';
 import { speciesByName, speciesList } from '../../server/src/physics/species/list';
 import { dragSources } from '../../server/src/physics/particles/sphereDrag';
 import { kineticSources } from '../../server/src/physics/rarefied/kineticCoefficients';
@@ -8,6 +10,14 @@ import { statePropertyNamed, stateProperties } from '../../server/src/physics/st
 import { measuredVirial } from '../../server/src/physics/thermo/measuredVirial';
 import { measuredDiffusionSource } from '../../server/src/physics/transport/measuredDiffusion';
 import { everyFigure, figures, mixture, valueOf } from '../support/gases';
+
+/** A molecule of a file, to see what its methods cite. */
+const polar = {
+  name: 'polar',
+  molarMass: 0.03,
+  lennardJones: { diameter: 3.5e-10, wellDepth: 300 },
+  dipoleMoment: 5e-30,
+};
 
 describe('lists', () => {
   it('hold every output of a state, once', () => {
@@ -29,7 +39,8 @@ describe('lists', () => {
   it('cite nothing in vain', () => {
     const data = JSON.stringify([speciesList, stateProperties, measuredDiffusionSource, measuredVirial('H2O')]);
     const methods = figures(mixture({ N2: 0.5, Ar: 0.5 }), 300, 1);
-    const cited = data + JSON.stringify(everyFigure(methods));
+    const stated = figures(pure(statedSpecies(polar)), 300, 1);
+    const cited = data + JSON.stringify([everyFigure(methods), everyFigure(stated)]);
     const elsewhere = JSON.stringify([kineticSources, endSources, dragSources]);
     for (const [id, { authors, year }] of Object.entries(sources)) {
       const surname = authors.split(/[,;]/)[0]!;

@@ -17,7 +17,7 @@ import { unknownName } from './problems/unknownName';
 import { wrongType } from './problems/wrongType';
 import { show } from './quantity';
 import type { Scope } from './scope';
-import type { Quantity, Value } from './values';
+import type { Quantity, TableValue, Value } from './values';
 
 /** The inputs of a declaration, each of its type and within its bounds; nothing when some are missing or wrong. */
 export function readInputs(
@@ -91,6 +91,8 @@ function readInput(entry: Entry, key: Key, scope: Scope): Value | undefined {
   const value = evaluate(node, scope);
   if (!value) return undefined;
   if (type.kind === 'quantity' && value.kind === 'quantity') return checkQuantity(entry, key, value, scope);
+  if (type.kind === 'quantity' && value.kind === 'table' && type.orTableOver !== undefined)
+    return checkTable(entry, key, value, scope);
   if (fits(value, key)) return value;
   scope.report(wrongType.at(node.span, { subject: key.name, wants: wants(key), found: describeValue(value) }));
   return undefined;
@@ -109,6 +111,36 @@ function checkQuantity(entry: Entry, key: Key, value: Quantity, scope: Scope): Q
     return undefined;
   }
   return within(entry, key.name, value, kind, type.bound, scope) ? { ...value, quantityKind: kind.name } : undefined;
+}
+
+/** Every row of a table is of the right kinds and within the bounds. */
+function checkTable(entry: Entry, key: Key, table: TableValue, scope: Scope): TableValue | undefined {
+  const { type } = key;
+  if (type.kind !== 'quantity' || entry.value.kind === 'mixture') return undefined;
+  const [over, kind] = [kindNamed(type.orTableOver ?? ''), kindNamed(type.quantity)];
+  const [first] = table.rows;
+  if (!over || !kind || !first) return undefined;
+  const literal = entry.value.kind === 'table' ? entry.value.rows[0] : undefined;
+  const place = `the places of ${key.name}`;
+  if (first.at.dimension !== over.dimension) {
+    const wanted = {
+      subject: place,
+      dimension: over.dimension,
+      wants: withArticle(over.title.toLowerCase()),
+      kind: over,
+    };
+    mismatch(literal?.at ?? entry.value, first.at, wanted, scope);
+    return undefined;
+  }
+  if (first.value.dimension !== kind.dimension && !(type.orAmountFlow && first.value.dimension === amountFlow)) {
+    const wanted = { subject: key.name, dimension: kind.dimension, wants: wants(key), kind };
+    mismatch(literal?.value ?? entry.value, first.value, wanted, scope);
+    return undefined;
+  }
+  return table.rows.every((row) => within(entry, key.name, row.value, kind, type.bound, scope)) &&
+    table.rows.every((row) => within(entry, place, row.at, over, 'positive', scope))
+    ? table
+    : undefined;
 }
 
 function within(

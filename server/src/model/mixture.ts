@@ -11,12 +11,15 @@ import { figure } from './figures';
 import { reportGasRemarks } from './gasRemarks';
 import type { Part } from './mixtureParts';
 import { readParts } from './mixtureParts';
+import { contradictoryInput } from './problems/contradictoryInput';
 import { unknownName } from './problems/unknownName';
 import { wrongType } from './problems/wrongType';
 import { plainNumber, quantity } from './quantity';
 import { resultNamed } from './results';
 import type { Scope } from './scope';
-import type { Gas, Members, Quantity, Value } from './values';
+import { speciesOf } from './statedGas';
+import type { Leans } from './tolerance';
+import type { Gas, Members, Quantity, StatedSpecies, Value } from './values';
 import { kindNamed } from '../quantities/quantityKinds';
 
 /** The gas that a mixture describes: a single gas, or parts with their shares. */
@@ -24,7 +27,7 @@ export function evaluateMixture(node: Mixture, scope: Scope): Gas | undefined {
   const [only, second] = node.parts;
   if (only && !second && !only.amount) return singleGas(only.name, scope);
   const parts = readParts(node, scope, (name) => gasNamed(name, scope));
-  const gas = parts && blend(parts);
+  const gas = parts && blend(parts, node, scope);
   if (gas) reportGasRemarks(gas, node.span, scope);
   return gas;
 }
@@ -57,6 +60,11 @@ export function gasOf(value: Value): Gas | undefined {
   return value.kind === 'gas' ? value : undefined;
 }
 
+/** A molecule that a file declares, as a gas of its own. */
+export function statedGas(stated: StatedSpecies): Gas {
+  return gas([{ species: speciesOf(stated), fraction: plainNumber(1), stated }]);
+}
+
 /** A built-in gas, by its formula or one of its names. */
 export function builtInGas(name: string): Gas | undefined {
   const species = speciesByName(name) ?? speciesByName(name.replaceAll('_', ' '));
@@ -79,21 +87,35 @@ function reportUnknown(node: Name, scope: Scope): void {
 }
 
 /** A mixture of mixtures is one mixture; a species that comes in twice is counted together. */
-function blend(parts: readonly Part[]): Gas {
+function blend(parts: readonly Part[], node: Mixture, scope: Scope): Gas | undefined {
   const shares = new Map<string, Share>();
   for (const { gas: part, fraction } of parts) {
-    part.composition.species.forEach((species, index) => {
+    for (const [index, species] of part.composition.species.entries()) {
+      const { formula } = species;
       const own = multiply(fraction, part.fractions[index] ?? plainNumber(0));
-      const before = shares.get(species.formula);
-      shares.set(species.formula, { species, fraction: before ? add(before.fraction, own) : own });
-    });
+      const before = shares.get(formula);
+      if (before && !alike(before.species, species)) {
+        scope.report(contradictoryInput.at(node.span, { why: `two different species are both called ${formula}` }));
+        return undefined;
+      }
+      const stated = part.stated.get(formula);
+      const share = { species, fraction: before ? add(before.fraction, own) : own };
+      shares.set(formula, stated ? { ...share, stated } : share);
+    }
   }
   return gas([...shares.values()]);
+}
+
+/** Used files may each declare a species of the same name. */
+function alike(one: Species, other: Species): boolean {
+  return one === other || JSON.stringify(one) === JSON.stringify(other);
 }
 
 interface Share {
   readonly species: Species;
   readonly fraction: Quantity;
+  /** If a file declares it. */
+  readonly stated?: StatedSpecies;
 }
 
 function gas(shares: readonly Share[]): Gas {
@@ -108,49 +130,59 @@ function gas(shares: readonly Share[]): Gas {
   const molarMass = totalMolarMass(shares, meanMolarMass(composition));
   const masses = massFractions(composition);
   const species = new Map<string, Members>();
-  shares.forEach(({ species: each }, index) => {
+  shares.forEach((share, index) => {
     const fraction = fractions[index] ?? plainNumber(0);
     const mass = masses[index] ?? 0;
+    const own = ownMass(share);
     species.set(
-      each.formula,
-      members({
-        mole_fraction: fraction,
-        mass_fraction: massFraction(each, fraction, molarMass, mass),
-        molar_mass: ownMass(each),
-      }),
+      share.species.formula,
+      members(
+        {
+          mole_fraction: fraction,
+          mass_fraction: massFraction(own, fraction, molarMass, mass),
+          molar_mass: own,
+        },
+        [share],
+      ),
     );
   });
-  return { kind: 'gas', composition, fractions, members: members({ molar_mass: molarMass }), species };
+  const stated = new Map(
+    shares.flatMap((share) => (share.stated ? [[share.species.formula, share.stated] as const] : [])),
+  );
+  return { kind: 'gas', composition, fractions, stated, members: members({ molar_mass: molarMass }, shares), species };
 }
 
 /** M = Σ xᵢMᵢ. The fractions add up to one, so only differences of molar mass make it uncertain. */
 function totalMolarMass(shares: readonly Share[], si: number): Quantity {
   const [first] = shares;
   if (!first) return molar(si);
-  const reference = molar(first.species.molarMass.value);
+  const reference = ownMass(first);
   const sum = shares.reduce(
-    (total, { species, fraction }) =>
-      add(total, multiply(fraction, subtract(molar(species.molarMass.value), reference))),
+    (total, share) => add(total, multiply(share.fraction, subtract(ownMass(share), reference))),
     reference,
   );
   return { ...sum, si };
 }
 
-function massFraction(species: Species, fraction: Quantity, molarMass: Quantity, si: number): Quantity {
-  return { ...divide(multiply(fraction, molar(species.molarMass.value)), molarMass), si };
+function massFraction(own: Quantity, fraction: Quantity, molarMass: Quantity, si: number): Quantity {
+  return { ...divide(multiply(fraction, own), molarMass), si };
 }
 
-function ownMass(species: Species): Quantity {
-  return molar(species.molarMass.value);
+/** Exact if it is of a built-in species: its error is far below that of anything else. */
+function ownMass({ species, stated }: Share): Quantity {
+  const mass = stated?.inputs.get('molar_mass');
+  return molar(species.molarMass.value, mass?.kind === 'quantity' ? mass.leans : undefined);
 }
 
-function molar(si: number): Quantity {
+function molar(si: number, leans?: Leans): Quantity {
   const kind = kindNamed('molar_mass');
-  return { ...quantity(si, kind?.dimension ?? dimensionless), quantityKind: 'molar_mass' };
+  return { ...quantity(si, kind?.dimension ?? dimensionless, leans), quantityKind: 'molar_mass' };
 }
 
-function members(values: Readonly<{ [name: string]: Quantity }>): Members {
-  const provenance = { method: 'composition: molar masses by CIAAW', sources: [], assumptions: [] };
+function members(values: Readonly<{ [name: string]: Quantity }>, shares: readonly Share[]): Members {
+  const [built, stated] = [shares.some((share) => !share.stated), shares.some((share) => share.stated)];
+  const origin = [...(built ? ['by CIAAW'] : []), ...(stated ? ['as the file states them'] : [])].join(' or ');
+  const provenance = { method: `composition: molar masses ${origin}`, sources: [], assumptions: [] };
   return new Map(
     Object.entries(values).map(([name, value]) => {
       const kind = resultNamed(name)?.quantityKind;

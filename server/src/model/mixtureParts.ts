@@ -132,10 +132,17 @@ function byFraction(node: Mixture, rows: readonly KnownRow[], scope: Scope): rea
 function byAmount(rows: readonly KnownRow[], by: 'amount' | 'mass'): readonly Part[] {
   const amounts = rows.map(({ gas, amount }) => {
     if (amount === 'balance') return plainNumber(0);
-    return by === 'amount' ? amount : divide(amount, plainNumber(meanMolarMass(gas.composition)));
+    return by === 'amount' ? amount : divide(amount, molarMassOf(gas));
   });
   const sum = amounts.reduce(add);
   return rows.map(({ gas }, index) => ({ gas, fraction: divide(amounts[index] ?? plainNumber(0), sum) }));
+}
+
+function molarMassOf({ members, composition }: Gas): Quantity {
+  const mass = members.get('molar_mass');
+  return mass?.kind === 'figure' && mass.value.kind === 'quantity'
+    ? mass.value
+    : plainNumber(meanMolarMass(composition));
 }
 
 /** Scale all, or let the last part take up the rest. */

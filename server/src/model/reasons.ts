@@ -45,6 +45,8 @@ export function dataTitle(data: DataKind): string {
       return 'intermolecular potential';
     case 'saturation_pressure':
       return 'saturation pressure';
+    case 'saturation_curve':
+      return 'course of the saturation pressure with temperature';
     case 'critical_point':
       return 'critical point';
   }
@@ -52,6 +54,7 @@ export function dataTitle(data: DataKind): string {
 
 /** A published work, as a reference reads. */
 export function citation(id: SourceId): string {
+  if (id === 'the file') return 'as stated in the file';
   const source: { authors: string; title: string; year: number; published: string; doi?: string } = sources[id];
   const { authors, title, year, published, doi } = source;
   return `${authors} (${year}): ${title.replace(/\.$/, '')}. ${published}${doi ? `, doi:${doi}` : ''}`;

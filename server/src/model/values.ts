@@ -48,8 +48,16 @@ export interface Gas {
   readonly kind: 'gas';
   readonly composition: Composition;
   readonly fractions: readonly Quantity[];
+  /** What files state of those of its molecules that are not built in, by name. */
+  readonly stated: ReadonlyMap<string, StatedSpecies>;
   readonly members: Members;
   readonly species: ReadonlyMap<string, Members>;
+}
+
+/** A molecule that a file declares: what is given of it, with its tolerance. */
+export interface StatedSpecies {
+  readonly name: string;
+  readonly inputs: ReadonlyMap<string, Value>;
 }
 
 /** Whether a condition holds. */

@@ -14,5 +14,8 @@ export const h = constantNamed('h').value;
 /** Speed of light in vacuum, m/s. */
 export const c = constantNamed('c').value;
 
+/** Permittivity of vacuum, F/m. */
+export const epsilon0 = constantNamed('eps_0').value;
+
 /** Molar gas constant, J/(mol K). */
 export const R = constantNamed('R').value;

@@ -84,7 +84,13 @@ export type Note =
 
 /** The sorts of data that a species may have or lack. */
 export type DataKind =
-  'viscosity' | 'conductivity' | 'heat_capacity' | 'pair_potential' | 'saturation_pressure' | 'critical_point';
+  | 'viscosity'
+  | 'conductivity'
+  | 'heat_capacity'
+  | 'pair_potential'
+  | 'saturation_pressure'
+  | 'saturation_curve'
+  | 'critical_point';
 
 const noNotes: readonly Note[] = [];
 

@@ -18,7 +18,8 @@ export interface Sourced<T> {
   readonly uncertainty?: number;
 }
 
-export type SourceId = keyof typeof sources;
+/** A published work, or the file that is being read, where that states a molecule of its own. */
+export type SourceId = keyof typeof sources | 'the file';
 
 export const sources = {
   'CIAAW 2021': {
@@ -449,6 +450,13 @@ export const sources = {
     year: 1961,
     published: 'J. Chem. Phys. 35, 1676',
     doi: '10.1063/1.1732130',
+  },
+  'Brokaw 1969': {
+    authors: 'Brokaw, R. S.',
+    title: 'Predicting transport properties of dilute gases',
+    year: 1969,
+    published: 'Ind. Eng. Chem. Process Des. Dev. 8, 240',
+    doi: '10.1021/i260030a015',
   },
   'IAPWS R17-20': {
     authors: 'International Association for the Properties of Water and Steam',

@@ -23,7 +23,7 @@ export interface Kind {
   /** A snippet of the whole declaration, with tab stops. */
   readonly snippet: string;
   /** Absent while the kind is read and checked but not computed. */
-  compute?(given: Given, scope: Scope): Record | undefined;
+  compute?(given: Given, scope: Scope): Record | Gas | undefined;
 }
 
 /** `of GAS`, `from STATE`, `through LINE` */

@@ -8,6 +8,7 @@ import { quantityInput } from '../inputs';
 import type { Propagated } from '../propagate';
 import { propagate } from '../propagate';
 import type { Scope } from '../scope';
+import { movableGas } from '../statedGas';
 import { exact } from '../tolerance';
 import type { Gas, Value } from '../values';
 
@@ -20,14 +21,12 @@ export function runState(
   const siteDensity = scope.condition('site_density');
   const point = POINT.map((name) => quantityInput(inputs, name));
   const diameter = quantityInput(inputs, 'collision_diameter');
+  const movable = movableGas(gas);
   const absent = { si: NaN, leans: exact };
   return propagate<Outcome<StateFigures>>({
-    inputs: [...point.map((value) => value ?? absent), diameter ?? absent, siteDensity, ...gas.fractions],
-    run: ([p, T, n, rho, d, sites, ...fractions], factors) => {
-      const composition = fractions.some((fraction, index) => fraction !== gas.composition.moleFractions[index])
-        ? { ...gas.composition, moleFractions: fractions }
-        : gas.composition;
-      return stateAt(composition, { p, T, n, rho, d, sites }, factors);
+    inputs: [...point.map((value) => value ?? absent), diameter ?? absent, siteDensity, ...movable.inputs],
+    run: ([p, T, n, rho, d, sites, ...ofGas], factors) => {
+      return stateAt(movable.compositionAt(ofGas), { p, T, n, rho, d, sites }, factors);
     },
     errorsOf: (result) => (result.ok ? result.value.modelErrors : []),
     valuesOf: (result) => (result.ok ? numbersOf(result.value) : new Map()),

@@ -18,14 +18,23 @@ export interface Species {
   /** Over the solids and the liquid, from cold to warm, each curve with its own source. */
   readonly saturation?: readonly Sourced<SaturationCurve>[];
   readonly lennardJones?: Sourced<LennardJones>;
+  /** The diameter, m, of molecules that are to collide as hard spheres; else it follows from the viscosity. */
+  readonly hardSphere?: Sourced<number>;
   /** Electric dipole moment, C m, of a polar molecule. */
   readonly dipoleMoment?: Sourced<number>;
   readonly critical?: Sourced<CriticalPoint>;
   /** What its molecules join to, in part, or come from, where the vapour is not of one kind. */
   readonly associates?: Sourced<string>;
   readonly hazards: readonly Sourced<Hazard>[];
+  /** What a file says of its hazards, word for word. */
+  readonly cautions?: Sourced<string>;
   /** Mole fractions of what a blend consists of. */
   readonly blend?: Sourced<Readonly<Record<string, number>>>;
+}
+
+/** Whether a species is stated by a file, so that no published data hold for it even if it has the name of a gas that has them. */
+export function isStated({ molarMass }: Species): boolean {
+  return molarMass.source === 'the file';
 }
 
 /** The 12-6 potential V(r) = 4ε[(σ/r)¹² − (σ/r)⁶]. */
@@ -47,24 +56,27 @@ export interface CriticalPoint {
 }
 
 /** Hazard classes by their GHS names; a simple asphyxiant is a class of the OSHA standard only. */
-export type Hazard =
-  | 'flammable gas'
-  | 'pyrophoric gas'
-  | 'chemically unstable gas'
-  | 'oxidising gas'
-  | 'flammable liquid'
-  | 'pyrophoric liquid'
-  | 'emits flammable gas with water'
-  | 'acute toxicity, inhalation'
-  | 'acute toxicity, dermal'
-  | 'narcotic effects'
-  | 'carcinogenicity'
-  | 'germ cell mutagenicity'
-  | 'reproductive toxicity'
-  | 'specific target organ toxicity'
-  | 'skin corrosion'
-  | 'skin irritation'
-  | 'serious eye irritation'
-  | 'hazardous to the aquatic environment'
-  | 'hazardous to the ozone layer'
-  | 'simple asphyxiant';
+export const hazardClasses = [
+  'flammable gas',
+  'pyrophoric gas',
+  'chemically unstable gas',
+  'oxidising gas',
+  'flammable liquid',
+  'pyrophoric liquid',
+  'emits flammable gas with water',
+  'acute toxicity, inhalation',
+  'acute toxicity, dermal',
+  'narcotic effects',
+  'carcinogenicity',
+  'germ cell mutagenicity',
+  'reproductive toxicity',
+  'specific target organ toxicity',
+  'skin corrosion',
+  'skin irritation',
+  'serious eye irritation',
+  'hazardous to the aquatic environment',
+  'hazardous to the ozone layer',
+  'simple asphyxiant',
+] as const;
+
+export type Hazard = (typeof hazardClasses)[number];

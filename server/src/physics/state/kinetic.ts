@@ -2,7 +2,7 @@ import { h, k, R } from '../constants';
 import { map, map2, success } from '../outcome';
 import { measuredDiffusionSource } from '../transport/measuredDiffusion';
 import type { GasState, SpeciesState } from './gasState';
-import type { StateProperty } from './property';
+import type { Method, StateProperty } from './property';
 import { ofSpecies, overMolecules, total } from './property';
 
 /*
@@ -12,6 +12,11 @@ import { ofSpecies, overMolecules, total } from './property';
 
 const maxwell = { sources: ['Chapman & Cowling 1970'], restsOn: [] } as const;
 const spheres = { sources: ['Chapman & Cowling 1970'], restsOn: ['viscosity'] } as const;
+
+const byViscosity: Method = {
+  method: 'hard-sphere diameter that gives the viscosity at this temperature, first-order Chapman–Enskog',
+  sources: spheres.sources,
+};
 
 const pairDiffusionSources = [measuredDiffusionSource, 'Hirschfelder 1954', 'Neufeld 1972', 'Fuller 1966'] as const;
 
@@ -100,8 +105,10 @@ export const kineticProperties: readonly StateProperty[] = [
     ...ofSpecies('collision_diameter', (one) => one.diameter),
     symbol: 'd',
     quantityKind: 'length',
-    method: 'hard-sphere diameter that gives the viscosity at this temperature, first-order Chapman–Enskog',
-    ...spheres,
+    ...byViscosity,
+    restsOn: spheres.restsOn,
+    methodFor: ({ hardSphere }) =>
+      hardSphere === undefined ? byViscosity : { method: 'as the file states it', sources: ['the file'] },
   },
   {
     name: 'collision_frequency',

@@ -31,6 +31,9 @@ const methodErrors = {
   self_diffusion: 0.04,
 } as const;
 
+/** Of a mixture, where a potential is missing. */
+const withoutPotential = 0.06;
+
 /** Every model error that stands behind the figures of a state. */
 export function modelErrors({ composition, point }: StateRequest): ModelError[] {
   const { species } = composition;
@@ -46,23 +49,26 @@ export function modelErrors({ composition, point }: StateRequest): ModelError[] 
   if (methods.has('monatomic')) errors.push(method('monatomic_conductivity'));
   if (methods.has('eucken')) errors.push(method('eucken'));
   if (1 < species.length) {
+    const rough = species.some(({ lennardJones }) => lennardJones === undefined);
     errors.push(
-      method('mixture_viscosity'),
-      method('mixture_conductivity'),
+      { key: 'mixture_viscosity', relative: rough ? withoutPotential : methodErrors.mixture_viscosity },
+      { key: 'mixture_conductivity', relative: rough ? withoutPotential : methodErrors.mixture_conductivity },
       ...diffusionErrors(species, point.temperature),
     );
   } else {
     errors.push(method('self_diffusion'));
   }
-  return errors;
+  return errors.filter(({ relative }) => 0 < relative);
 }
 
-/** Each way of finding the diffusion of a pair has its own error; among the estimates, polar molecules are the worst. */
+/** Each way of finding the diffusion of a pair has its own error; among the estimates, those of polar molecules and of hard spheres are the worst. */
 function diffusionErrors(species: readonly Species[], T: number): ModelError[] {
   const pairs = species.flatMap((one, i) => species.slice(0, i).map((other) => ({ one, other })));
   const found = new Map<DiffusionMethod, boolean>();
   for (const { one, other } of pairs) {
-    const polar = one.dipoleMoment !== undefined || other.dipoleMoment !== undefined;
+    const polar = [one, other].some(
+      ({ dipoleMoment, lennardJones }) => dipoleMoment !== undefined || lennardJones === undefined,
+    );
     const by = diffusionMethod(one, other, T);
     found.set(by, polar || (found.get(by) ?? false));
   }

@@ -2,7 +2,7 @@ import { R } from '../constants';
 import type { Outcome } from '../outcome';
 import { failure, success } from '../outcome';
 import type { Species } from '../species/species';
-import { measuredVirial } from '../thermo/measuredVirial';
+import { measuredVirialOf } from '../thermo/measuredVirial';
 import { isQuantumGas } from '../thermo/tsonopoulos';
 import type { GasState } from './gasState';
 import type { Method, StateProperty } from './property';
@@ -24,7 +24,7 @@ const ofPairs: Method = {
 
 function virialMethod(species: Species): Method {
   if (species.blend !== undefined) return ofPairs;
-  const fit = measuredVirial(species.formula);
+  const fit = measuredVirialOf(species);
   if (fit !== undefined) return { method: 'fitted to measurements', sources: [fit.source] };
   return isQuantumGas(species) ? quantumGas : correspondingStates;
 }

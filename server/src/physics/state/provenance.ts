@@ -97,6 +97,7 @@ function dataOf(species: Species, kind: DataKind): readonly (Sourced<unknown> | 
     case 'pair_potential':
       return [species.lennardJones];
     case 'saturation_pressure':
+    case 'saturation_curve':
       return species.saturation ?? [];
     case 'critical_point':
       return [species.critical];
@@ -126,6 +127,7 @@ function dataRange(species: Species, kind: DataKind): { readonly low: number; re
     case 'heat_capacity':
       return species.heatCapacity && heatCapacityRange(species.heatCapacity.value);
     case 'saturation_pressure':
+    case 'saturation_curve':
       return saturationRange(species);
     case 'pair_potential':
     case 'critical_point':

@@ -96,7 +96,7 @@ function conductivity(
 }
 
 function diameter(species: Species, eta: Outcome<number>, request: StateRequest): Outcome<number> {
-  const stated = request.collisionDiameter;
+  const stated = request.collisionDiameter ?? species.hardSphere?.value;
   if (stated === undefined) {
     return map(eta, (value) => diameterOfViscosity(value, species.molarMass.value, request.point.temperature));
   }

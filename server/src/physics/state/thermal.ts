@@ -13,6 +13,34 @@ const heat = { sources: [], restsOn: ['heat_capacity'] } as const;
 const idealGas = 'ideal gas, fitted heat capacity';
 const blended = { method: 'ideal gas, mean over molecules', sources: [] } as const;
 
+/** How a file's own molecule has its viscosity. */
+function viscosityMethod({ viscosity, dipoleMoment }: Species): Method {
+  if (viscosity?.source !== 'the file') return correlation;
+  switch (viscosity.value.kind) {
+    case 'potential':
+      return dipoleMoment === undefined ? ofPotential : ofPolarPotential;
+    case 'root-ratio':
+      return { method: 'hard spheres of the diameter that the file states', sources: ['Chapman & Cowling 1970'] };
+    default:
+      return asStated;
+  }
+}
+
+const asStated: Method = { method: 'as the file states it', sources: [] };
+const ofPotential: Method = {
+  method: 'second-order Chapman–Enskog with the 12-6 potential that the file states',
+  sources: ['Hirschfelder 1954', 'Neufeld 1972'],
+};
+const ofPolarPotential: Method = {
+  method: 'second-order Chapman–Enskog with the potential and the dipole that the file states, by Stockmayer',
+  sources: ['Hirschfelder 1954', 'Neufeld 1972', 'Brokaw 1969'],
+};
+
+const heatMethod = ({ heatCapacity }: Species): Method =>
+  heatCapacity?.source === 'the file'
+    ? { method: 'ideal gas, heat capacity as the file states it', sources: [] }
+    : { method: idealGas, sources: [] };
+
 const ratio = (cp: number) => cp / (cp - R);
 const soundSpeed = (cp: number, M: number, T: number) => Math.sqrt((ratio(cp) * R * T) / M);
 
@@ -50,6 +78,7 @@ export const thermalProperties: readonly StateProperty[] = [
     quantityKind: 'heat_capacity',
     perSpecies: true,
     method: idealGas,
+    methodFor: heatMethod,
     mixed: blended,
     ...heat,
     compute: ({ cp, molarMass }) => map(cp, (value) => value / molarMass),
@@ -61,6 +90,7 @@ export const thermalProperties: readonly StateProperty[] = [
     quantityKind: 'heat_capacity',
     perSpecies: true,
     method: idealGas,
+    methodFor: heatMethod,
     mixed: blended,
     ...heat,
     compute: ({ cp, molarMass }) => map(cp, (value) => (value - R) / molarMass),
@@ -72,6 +102,7 @@ export const thermalProperties: readonly StateProperty[] = [
     quantityKind: 'molar_heat_capacity',
     perSpecies: true,
     method: idealGas,
+    methodFor: heatMethod,
     mixed: blended,
     ...heat,
     compute: ({ cp }) => cp,
@@ -83,6 +114,7 @@ export const thermalProperties: readonly StateProperty[] = [
     quantityKind: 'molar_heat_capacity',
     perSpecies: true,
     method: idealGas,
+    methodFor: heatMethod,
     mixed: blended,
     ...heat,
     compute: ({ cp }) => map(cp, (value) => value - R),
@@ -115,6 +147,7 @@ export const thermalProperties: readonly StateProperty[] = [
     quantityKind: 'viscosity',
     perSpecies: true,
     method: 'dilute-gas correlation',
+    methodFor: viscosityMethod,
     mixed: {
       method: 'first-order Chapman–Enskog mixture, joined to the species’ own viscosities',
       sources: ['Hirschfelder 1954', 'Neufeld 1972', 'Svehla 1962'],

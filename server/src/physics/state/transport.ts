@@ -1,6 +1,6 @@
 import type { Composition } from '../composition';
 import type { Outcome } from '../outcome';
-import { all, failure, map, map2, success } from '../outcome';
+import { all, map, map2, success } from '../outcome';
 import { diffusionInMixture, diffusionMethod, pairDiffusion, selfDiffusivity } from '../transport/diffusion';
 import { mixtureConductivity } from '../transport/mixtureConductivity';
 import { mixtureViscosity } from '../transport/mixtureViscosity';
@@ -46,19 +46,17 @@ function ofMany(alone: readonly SpeciesAlone[], composition: Composition, point:
   const molarMass = composition.species.map((species) => species.molarMass.value);
   const viscosities = all(alone.map((one) => one.viscosity));
   const conductivities = all(alone.map((one) => one.conductivity));
-  const own = alone.map(({ viscosity }) => (viscosity.ok ? viscosity.value : undefined));
-  const pairs = pairsOf(composition.species, own, point.temperature);
-  const known = wholly(pairs, composition);
+  const known = alone.map(({ viscosity }) => (viscosity.ok ? viscosity.value : undefined));
+  const pairs = pairsOf(composition.species, known, point.temperature);
   const rows = diffusionRows(pairs, composition, point.temperature, trial);
   const matrix = allRows(rows);
   return {
-    viscosity: map2(viscosities, known, (eta, pair) => {
-      return factor(trial, 'mixture_viscosity') * mixtureViscosity(x, molarMass, eta, pair);
+    viscosity: map(viscosities, (eta) => {
+      return factor(trial, 'mixture_viscosity') * mixtureViscosity(x, molarMass, eta, pairs);
     }),
-    conductivity: map2(map2(viscosities, conductivities, both), map2(known, matrix, both), (single, double) => {
-      const [viscosity, conductivity] = single;
-      const [pair, diffusion] = double;
-      const mixture = { x, molarMass, viscosity, conductivity, pairs: pair, diffusion };
+    conductivity: map2(map2(viscosities, conductivities, both), matrix, (own, diffusion) => {
+      const [viscosity, conductivity] = own;
+      const mixture = { x, molarMass, viscosity, conductivity, pairs, diffusion };
       return factor(trial, 'mixture_conductivity') * mixtureConductivity(mixture);
     }),
     diffusivities: rows.map((row, i) => map(row, (values) => diffusionInMixture(i, x, values) / point.numberDensity)),
@@ -80,13 +78,6 @@ function diffusionRows(
       }),
     ),
   );
-}
-
-/** The pairs, if every species has a potential. */
-function wholly(pairs: Pairs, { species }: Composition): Outcome<Pairs> {
-  const lacking = species.find(({ lennardJones }) => lennardJones === undefined);
-  if (lacking === undefined) return success(pairs);
-  return failure({ kind: 'no-data', species: lacking.formula, property: 'pair_potential' });
 }
 
 function allRows(rows: readonly Outcome<readonly number[]>[]): Outcome<readonly (readonly number[])[]> {

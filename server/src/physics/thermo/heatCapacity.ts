@@ -1,4 +1,6 @@
 import { c as lightSpeed, h, k, R } from '../constants';
+import type { Point } from '../interpolated';
+import { interpolated } from '../interpolated';
 
 /** How the ideal-gas heat capacity of a species depends on temperature. */
 export type HeatCapacity =
@@ -10,7 +12,9 @@ export type HeatCapacity =
       readonly high: number;
       readonly intervals: readonly Nasa9Interval[];
     }
-  | RotorVibrator;
+  | RotorVibrator
+  /** A table, as a file states it. */
+  | { readonly kind: 'points'; readonly low: number; readonly high: number; readonly points: readonly Point[] };
 
 /** cp/R = a₁T⁻² + a₂T⁻¹ + a₃ + a₄T + a₅T² + a₆T³ + a₇T⁴ up to `high`, K. */
 export interface Nasa9Interval {
@@ -48,6 +52,8 @@ export function molarHeatCapacity(data: HeatCapacity, temperature: number): numb
       return R * nasa9(data.intervals, clamp(temperature, data.low, data.high));
     case 'rotor-vibrator':
       return R * rotorVibrator(data, clamp(temperature, data.low, data.high));
+    case 'points':
+      return interpolated(data.points, temperature);
     default:
       return data satisfies never;
   }

@@ -1,4 +1,6 @@
 import type { SourceId } from '../sources';
+import type { Species } from '../species/species';
+import { isStated } from '../species/species';
 
 /** Second virial coefficients as measured and fitted, by formula, between `low` and `high`, K. */
 export type MeasuredVirial = {
@@ -16,6 +18,11 @@ type Form =
 /** The fit for a gas, if it has been measured. */
 export function measuredVirial(formula: string): MeasuredVirial | undefined {
   return byFormula.get(formula);
+}
+
+/** The fit for a species, which a molecule that a file states has not, whatever its name. */
+export function measuredVirialOf(species: Species): MeasuredVirial | undefined {
+  return isStated(species) ? undefined : measuredVirial(species.formula);
 }
 
 /** B of a fit, m³/mol, at a temperature in K within its range. */

@@ -32,6 +32,9 @@ export function dewPoint(species: Species, pressure: number): Outcome<number> {
   const [first] = curves;
   const last = curves.at(-1);
   if (first === undefined || last === undefined) return unknown(species);
+  if (first.curve.kind === 'constant') {
+    return failure({ kind: 'no-data', species: species.formula, property: 'saturation_curve' });
+  }
   const wanted = Math.log(pressure);
   const low = logPressure(first, first.curve.low);
   const high = logPressure(last, last.curve.high);

@@ -1,3 +1,5 @@
+import type { Point } from '../interpolated';
+import { between } from '../interpolated';
 import { bracketedRoot } from './bracketedRoot';
 
 /** How the pressure of a vapour in equilibrium with its solid or liquid was correlated, between `low` and `high`, K. */
@@ -25,6 +27,10 @@ type Form =
     }
   /** log₁₀(p/p₀) = A − B/(T + C). */
   | { readonly kind: 'antoine'; readonly pressure: number; readonly a: number; readonly b: number; readonly c: number }
+  /** A table, as a file states it: between its points ln p is straight over 1/T, as Clausius and Clapeyron have it. */
+  | { readonly kind: 'points'; readonly points: readonly Point[] }
+  /** One pressure, as a file states it for the temperatures that it is about. */
+  | { readonly kind: 'constant'; readonly pressure: number }
   /** T = Σ Aᵢ ((ln p − B)/C)ⁱ, as the temperature scale defines itself by helium. */
   | {
       readonly kind: 'scale';
@@ -53,6 +59,10 @@ export function logSaturation(curve: SaturationCurve, T: number): number {
       const x = bracketedRoot((u) => polynomial(curve.coefficients, u) - T, -scaleReach, scaleReach);
       return curve.centre + curve.width * x;
     }
+    case 'points':
+      return logOfPoints(curve.points, T);
+    case 'constant':
+      return Math.log(curve.pressure);
     default:
       return curve satisfies never;
   }
@@ -71,4 +81,16 @@ const scaleReach = 1.6;
 
 function polynomial(coefficients: readonly number[], x: number): number {
   return coefficients.reduceRight((sum, coefficient) => sum * x + coefficient, 0);
+}
+
+function logOfPoints(points: readonly Point[], T: number): number {
+  const upper = Math.max(
+    1,
+    points.findIndex(({ at }) => T <= at),
+  );
+  const [a, b = a] = points
+    .slice(upper - 1, upper + 1)
+    .map(({ at, value }) => ({ at: 1 / at, value: Math.log(value) }));
+  if (a === undefined || b === undefined) return NaN;
+  return a === b ? a.value : between(a, b, 1 / T);
 }

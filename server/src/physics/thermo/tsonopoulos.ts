@@ -1,5 +1,6 @@
 import { R } from '../constants';
 import type { Species } from '../species/species';
+import { isStated } from '../species/species';
 
 /**
  * Second virial coefficients by the correlation of Tsonopoulos 1974 with the critical constants: for gases whose molecules do
@@ -32,15 +33,15 @@ export function tsonopoulosVirial({ temperature, pressure, acentric, a, b }: Cor
 
 /** The constants of one species at a temperature in K, if its critical point is known. */
 export function correspondingOf(species: Species, T: number): Corresponding | undefined {
-  const quantum = quantumGases.get(species.formula);
+  const quantum = isStated(species) ? undefined : quantumGases.get(species.formula);
   if (quantum !== undefined) return effective(quantum, species.molarMass.value, T);
   const critical = species.critical?.value;
   return critical && { ...critical, ...polarTerm(species, critical.temperature, critical.pressure) };
 }
 
 /** Whether a gas is so light that its critical constants depend on temperature here. */
-export function isQuantumGas({ formula }: Species): boolean {
-  return quantumGases.has(formula);
+export function isQuantumGas(species: Species): boolean {
+  return !isStated(species) && quantumGases.has(species.formula);
 }
 
 /**
@@ -103,12 +104,9 @@ function effective(gas: QuantumGas, molarMass: number, T: number): Corresponding
  * Polar molecules without hydrogen bonds: a = −2.14·10⁻⁴ μ_r − 4.308·10⁻²¹ μ_r⁸, b = 0, with μ_r = 10⁵ μ² p_c/T_c² in D, atm
  * and K (Tsonopoulos 1974, eq. 23). Water has constants of its own (table 6).
  */
-function polarTerm(
-  { formula, dipoleMoment }: Species,
-  Tc: number,
-  pc: number,
-): { readonly a: number; readonly b: number } {
-  if (formula === 'H2O') return { a: 0.0279, b: 0.0229 };
+function polarTerm(species: Species, Tc: number, pc: number): { readonly a: number; readonly b: number } {
+  const { formula, dipoleMoment } = species;
+  if (formula === 'H2O' && !isStated(species)) return { a: 0.0279, b: 0.0229 };
   if (dipoleMoment === undefined) return { a: 0, b: 0 };
   const moment = dipoleMoment.value / debye;
   const reduced = (1e5 * moment * moment * (pc / atmosphere)) / (Tc * Tc);

@@ -4,7 +4,7 @@ import type { Outcome } from '../outcome';
 import { failure, success } from '../outcome';
 import { speciesByName } from '../species/list';
 import type { Species } from '../species/species';
-import { fittedVirial, measuredVirial } from './measuredVirial';
+import { fittedVirial, measuredVirialOf } from './measuredVirial';
 import type { Corresponding } from './tsonopoulos';
 import { correspondingOf, correspondingOfPair, tsonopoulosVirial } from './tsonopoulos';
 
@@ -53,7 +53,7 @@ interface Known {
 
 /** As measured within the range of the measurements; beyond it, moved along Tsonopoulos's correlation without a step. */
 function pureVirial(species: Species, corresponding: Corresponding, T: number): number {
-  const fit = measuredVirial(species.formula);
+  const fit = measuredVirialOf(species);
   if (fit === undefined) return tsonopoulosVirial(corresponding, T);
   const end = Math.min(Math.max(T, fit.low), fit.high);
   const atEnd = fittedVirial(fit, end);

@@ -1,3 +1,5 @@
+import type { Point } from '../interpolated';
+import { interpolated } from '../interpolated';
 import { fluidity } from './stockmayer';
 
 /** How a property of the dilute gas was correlated with temperature. Every form gives SI from K between `low` and `high`. */
@@ -62,6 +64,8 @@ type Form =
       readonly theta: number;
       readonly terms: readonly { readonly n: number; readonly t: number }[];
     }
+  /** A table, as a file states it. */
+  | { readonly kind: 'points'; readonly points: readonly Point[] }
   /** One correlation below `from`, another above `to`, and between them the mean weighted evenly in ln T. */
   | {
       readonly kind: 'joined';
@@ -117,6 +121,8 @@ export function correlated(data: Correlation, T: number): number {
       const powers = data.terms.reduce((sum, { n, t }) => sum + n * Math.pow(T / data.theta, t), 0);
       return data.perViscosity * correlated(data.viscosity, T) + powers;
     }
+    case 'points':
+      return interpolated(data.points, T);
     case 'joined':
       return joined(data.cold, data.warm, data.from, data.to, T);
     default:
@@ -140,5 +146,7 @@ function exponent(pieces: readonly ExponentialPiece[], T: number): number {
 
 /** Σ cᵢ xⁱ. */
 function polynomial(coefficients: readonly number[], x: number): number {
-  return coefficients.reduceRight((sum, coefficient) => sum * x + coefficient, 0);
+  let sum = 0;
+  for (let i = coefficients.length - 1; 0 <= i; i--) sum = sum * x + (coefficients[i] ?? 0);
+  return sum;
 }

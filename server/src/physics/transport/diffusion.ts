@@ -2,15 +2,12 @@ import { k, N_A } from '../constants';
 import type { Outcome } from '../outcome';
 import { failure, success } from '../outcome';
 import type { Species } from '../species/species';
-import { aStar, combined, omega11 } from './collisionIntegrals';
+import { combined, omega11 } from './collisionIntegrals';
 import { fullerDiffusion } from './fullerDiffusion';
 import type { MeasuredPair } from './measuredDiffusion';
 import { measuredDiffusion, measuredPair, measuredRange } from './measuredDiffusion';
 import type { Pairs } from './pairs';
-import { reducedMass } from './pairs';
-
-/** A* where no potential is known: its value for most gases near room temperature, within 3 %. */
-const usualAStar = 1.1;
+import { ownAStar, reducedMass } from './pairs';
 
 /**
  * Self-diffusivity, m²/s: D = 6/5 A* η/ρ (Hirschfelder, Curtiss & Bird 1954, eq. 8.2-46 with 8.2-18).
@@ -22,20 +19,19 @@ export function selfDiffusivity(
   numberDensity: number,
   temperature: number,
 ): number {
-  const potential = species.lennardJones?.value;
-  const ratio = potential === undefined ? usualAStar : aStar(temperature / potential.wellDepth);
-  return (1.2 * ratio * viscosity) / (numberDensity * (species.molarMass.value / N_A));
+  return (1.2 * ownAStar(species, temperature) * viscosity) / (numberDensity * (species.molarMass.value / N_A));
 }
 
 /** How the diffusion of a pair is found; the names are those of its errors. */
 export type DiffusionMethod = 'measured_diffusion' | 'pair_diffusion' | 'fuller_diffusion';
 
-/** Measured, or estimated from the potentials, or where these are unknown from the volumes of the atoms. */
+/** Measured, or estimated from the potentials, or where these are unknown from the volumes of the atoms, else as hard spheres. */
 export function diffusionMethod(one: Species, other: Species, temperature: number): DiffusionMethod {
   const { low, high } = measuredRange;
-  const row = one === other ? undefined : measuredPair(one.formula, other.formula);
+  const row = one === other ? undefined : measuredPair(one, other);
   if (row !== undefined) return low <= temperature && temperature <= high ? 'measured_diffusion' : 'pair_diffusion';
-  return hasPotential(one) && hasPotential(other) ? 'pair_diffusion' : 'fuller_diffusion';
+  if (hasPotential(one) && hasPotential(other)) return 'pair_diffusion';
+  return fullerDiffusion(one, other, temperature) === undefined ? 'pair_diffusion' : 'fuller_diffusion';
 }
 
 /**
@@ -52,13 +48,13 @@ export function pairDiffusion(
   const one = species[i];
   const other = species[j];
   if (one === undefined || other === undefined) return failure({ kind: 'empty-composition' });
-  const row = i === j ? undefined : measuredPair(one.formula, other.formula);
+  const row = i === j ? undefined : measuredPair(one, other);
   if (row !== undefined) return success(measured(row, one, other, T));
-  const fromPotentials = estimated(i * species.length + j, one, other, pairs);
-  if (Number.isFinite(fromPotentials)) return success(fromPotentials);
-  const fromVolumes = fullerDiffusion(one, other, T);
+  const fromVolumes = hasPotential(one) && hasPotential(other) ? undefined : fullerDiffusion(one, other, T);
   if (fromVolumes !== undefined) return success(fromVolumes);
-  const lacking = hasPotential(one) ? other : one;
+  const estimate = estimated(i * species.length + j, one, other, pairs);
+  if (Number.isFinite(estimate)) return success(estimate);
+  const lacking = one.viscosity === undefined ? one : other;
   return failure({ kind: 'no-data', species: lacking.formula, property: 'pair_potential' });
 }
 

@@ -1,5 +1,6 @@
 import { k } from '../constants';
 import type { Species } from '../species/species';
+import { isStated } from '../species/species';
 
 /**
  * n Dᵢⱼ of two species, 1/(m s), from the volumes of their atoms (Fuller, Schettler & Giddings 1966, in the form and with the
@@ -7,6 +8,8 @@ import type { Species } from '../species/species';
  * Nothing where an atom is not in the table.
  */
 export function fullerDiffusion(one: Species, other: Species, T: number): number | undefined {
+  // The name that a file gives a molecule of its own is no formula.
+  if (isStated(one) || isStated(other)) return undefined;
   const v1 = diffusionVolume(one.formula);
   const v2 = diffusionVolume(other.formula);
   if (v1 === undefined || v2 === undefined) return undefined;

@@ -1,4 +1,6 @@
 import type { SourceId } from '../sources';
+import type { Species } from '../species/species';
+import { isStated } from '../species/species';
 
 /**
  * Diffusion of pairs of gases as measured: pD = a Tˢ exp(−b/T), the evaluations of Marrero & Mason 1972 (table 22), by formula.
@@ -51,8 +53,8 @@ const byPair: ReadonlyMap<string, MeasuredPair> = new Map(
   }),
 );
 
-export function measuredPair(one: string, other: string): MeasuredPair | undefined {
-  return byPair.get(pairKey(one, other));
+export function measuredPair(one: Species, other: Species): MeasuredPair | undefined {
+  return isStated(one) || isStated(other) ? undefined : byPair.get(pairKey(one.formula, other.formula));
 }
 
 /** pD in Pa m²/s, at a temperature in K within the range. */

@@ -1,4 +1,4 @@
-import { k, N_A } from '../constants';
+import { epsilon0, k, N_A } from '../constants';
 import type { LennardJones } from '../species/species';
 import { omega11, omega22 } from './collisionIntegrals';
 import type { Correlation } from './correlation';
@@ -15,6 +15,11 @@ export function viscosityOfPotential(
 ): Correlation {
   const prefactor = (0.3125 * Math.sqrt((molarMass / N_A) * k)) / (Math.sqrt(Math.PI) * diameter * diameter);
   return { kind: 'potential', prefactor, theta: wellDepth, polarity, ...range };
+}
+
+/** δ = µ²/(8πε₀ ε σ³) of a potential with a dipole moment, C m. */
+export function polarityOf({ diameter, wellDepth }: LennardJones, dipoleMoment: number): number {
+  return (dipoleMoment * dipoleMoment) / (8 * Math.PI * epsilon0 * k * wellDepth * diameter ** 3);
 }
 
 /**

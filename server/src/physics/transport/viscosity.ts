@@ -1,6 +1,7 @@
 import { k, N_A } from '../constants';
 import type { Note, Outcome } from '../outcome';
 import { failure, success } from '../outcome';
+import type { Sourced } from '../sources';
 import type { LennardJones, Species } from '../species/species';
 import { omega22 } from './collisionIntegrals';
 import type { Correlation } from './correlation';
@@ -9,7 +10,8 @@ import { correlated } from './correlation';
 /**
  * Dilute-gas viscosity of one species, Pa s, at a temperature in K.
  * Within its range the correlation stands. Beyond, it is continued in proportion to the Chapman–Enskog viscosity
- * of the species' 12-6 potential, which joins it without a step, and a note says so.
+ * of the species' 12-6 potential, which joins it without a step, and a note says so. A table of a file without a potential is
+ * continued as that of hard spheres.
  */
 export function viscosity(species: Species, temperature: number): Outcome<number> {
   const data = species.viscosity;
@@ -17,10 +19,10 @@ export function viscosity(species: Species, temperature: number): Outcome<number
   const { low, high } = data.value;
   if (low <= temperature && temperature <= high) return success(correlated(data.value, temperature));
   const range = { quantity: 'temperature', value: temperature, low, high } as const;
-  const potential = species.lennardJones?.value;
-  if (potential === undefined) return failure({ kind: 'outside-range', ...range, source: data.source });
+  const growth = growthOf(species, data, temperature);
+  if (growth === undefined) return failure({ kind: 'outside-range', ...range, source: data.source });
   const note: Note = { kind: 'outside-range', ...range, property: 'viscosity', species: species.formula };
-  return success(continued(data.value, potential, species.molarMass.value, temperature), [note]);
+  return success(correlated(data.value, temperature < low ? low : high) * growth, [note]);
 }
 
 /**
@@ -42,8 +44,11 @@ export function diameterOfViscosity(viscosity: number, molarMass: number, temper
   return Math.sqrt((0.3125 * Math.sqrt((molarMass / N_A) * k * temperature)) / (Math.sqrt(Math.PI) * viscosity));
 }
 
-function continued(data: Correlation, potential: LennardJones, molarMass: number, temperature: number): number {
-  const end = temperature < data.low ? data.low : data.high;
-  const growth = potentialViscosity(potential, molarMass, temperature) / potentialViscosity(potential, molarMass, end);
-  return correlated(data, end) * growth;
+/** By what factor the viscosity grows from the end of its range to a temperature beyond it. */
+function growthOf(species: Species, data: Sourced<Correlation>, temperature: number): number | undefined {
+  const end = temperature < data.value.low ? data.value.low : data.value.high;
+  const potential = species.lennardJones?.value;
+  if (potential === undefined) return data.source === 'the file' ? Math.sqrt(temperature / end) : undefined;
+  const molarMass = species.molarMass.value;
+  return potentialViscosity(potential, molarMass, temperature) / potentialViscosity(potential, molarMass, end);
 }
