@@ -129,7 +129,8 @@ describe('hover on a property', () => {
 
   it('says why a mixture has none, what comes later, and what is meant where there is no value', () => {
     assert.match(at(`${lock}let d = mixed.diff<*>usivity`).markdown, /a mixture has no diffusivity of its own/i);
-    assert.match(at(`${lock}let c = in_foreline.conduc<*>tance`).markdown, /computed by a later version/);
+    const port = 'orifice port { bore = 5 mm }\nsite at_port = residual in port\n';
+    assert.match(at(`${lock}${port}let c = at_port.conduc<*>tance`).markdown, /computed by a later version/);
     assert.match(at('let c = nothing.visc<*>osity').markdown, /The dynamic viscosity of the dilute gas\./);
   });
 
