@@ -7,6 +7,7 @@ import { offsetLiteral } from './literal';
 import { mismatch } from './mismatch';
 import { ambiguousTemperature } from './problems/ambiguousTemperature';
 import { contradictoryInput } from './problems/contradictoryInput';
+import { either } from './problems/problem';
 import { unknownName } from './problems/unknownName';
 import { wrongType } from './problems/wrongType';
 import { show } from './quantity';
@@ -83,7 +84,10 @@ export function evaluateIs(node: Is, scope: Scope): Verdict | undefined {
     return undefined;
   }
   const holds = (left.text === node.right.text) !== node.negated;
-  return plain(node, holds, [{ text: left.text }]);
+  const { reached = [] } = left;
+  const sides = [{ text: reached.length > 1 ? either(reached) : left.text }];
+  const open = reached.length > 1 && reached.includes(node.right.text);
+  return { ...plain(node, holds, sides), ...(open ? { status: 'undecided' } : {}) };
 }
 
 export function evaluateLogic(node: Logic, scope: Scope): Verdict | undefined {

@@ -11,5 +11,12 @@ export function regimeOf(knudsen: number, { slip, transitional, molecular }: Reg
   return knudsen < molecular ? 'transitional' : 'molecular';
 }
 
+/** The regimes that a Knudsen number with its half-width reaches. */
+export function regimesWithin(knudsen: number, halfWidth: number, limits: RegimeLimits): readonly Regime[] {
+  const first = regimes.indexOf(regimeOf(knudsen - halfWidth, limits));
+  const last = regimes.indexOf(regimeOf(knudsen + halfWidth, limits));
+  return regimes.slice(first, last + 1);
+}
+
 /** Set otherwise by `assume regime_limits = [slip: 0.01, transitional: 0.1, molecular: 10]`. */
 export const standardRegimeLimits: RegimeLimits = { slip: 0.01, transitional: 0.1, molecular: 10 };

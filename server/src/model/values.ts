@@ -23,6 +23,8 @@ export interface Word {
   readonly text: string;
   /** The words it could have been, where they are a closed list. */
   readonly of?: readonly string[];
+  /** The words that the tolerance behind it reaches, where they are several. */
+  readonly reached?: readonly string[];
 }
 
 /** A text in quotes. */

@@ -5,7 +5,8 @@ import { plainNumber, quantity } from '../quantity';
 import type { Scope } from '../scope';
 import type { Members, Provenance, Quantity, Record } from '../values';
 import { wrongType } from '../problems/wrongType';
-import { regimeOf, regimes } from '../regime';
+import { regimeOf, regimes, regimesWithin } from '../regime';
+import { halfWidth } from '../tolerance';
 import { quantityOf } from './siteMembers';
 import { particleMembers } from './siteParticle';
 import { passageMembers } from './sitePassage';
@@ -50,7 +51,12 @@ export function computeSite(state: Record, geometry: Record, span: Span, scope: 
     [
       'regime',
       figure(
-        { kind: 'word', text: regimeOf(knudsen.si, limits), of: regimes },
+        {
+          kind: 'word',
+          text: regimeOf(knudsen.si, limits),
+          of: regimes,
+          reached: regimesWithin(knudsen.si, halfWidth(knudsen.leans), limits),
+        },
         {
           ...provenance,
           method: `by the Knudsen number: viscous < ${limits.slip} ≤ slip < ${limits.transitional} ≤ transitional < ${limits.molecular} ≤ molecular`,
