@@ -4,29 +4,19 @@ import { formatNumber } from '../../quantities/format';
 import { quantityInput } from '../inputs';
 import { condensing } from '../problems/condensing';
 import { notIdeal } from '../problems/notIdeal';
-import { outsideRange } from '../problems/outsideRange';
 import { tooCold } from '../problems/tooCold';
 import { tooDense } from '../problems/tooDense';
 import { quantity, show } from '../quantity';
-import { dataTitle } from '../reasons';
 import type { Scope } from '../scope';
 import type { Given } from './kind';
+import { reportOutsideRange } from './reportOutsideRange';
 
 /** What the engine remarks on a state, as a problem at the input that it comes from. */
 export function reportStateNote(note: Note, given: Given, scope: Scope): void {
   switch (note.kind) {
-    case 'outside-range': {
-      const what = `the ${dataTitle(note.property)} of ${note.species}`;
-      scope.report(
-        outsideRange.at(given.place('temperature'), {
-          what,
-          value: kelvins(note.value),
-          low: kelvins(note.low),
-          high: kelvins(note.high),
-        }),
-      );
+    case 'outside-range':
+      reportOutsideRange([note], given, scope);
       return;
-    }
     case 'quantum':
       scope.report(
         tooCold.at(given.place('temperature'), { species: note.species, degeneracy: formatNumber(note.degeneracy, 2) }),
@@ -73,7 +63,3 @@ function reportCondensing(note: Extract<Note, { kind: 'condensing' }>, given: Gi
 }
 
 const pressureDimension = dimension({ mass: 1, length: -1, time: -2 });
-
-function kelvins(value: number): string {
-  return `${formatNumber(value, 4)} K`;
-}

@@ -2,7 +2,7 @@ import { contradictoryInput } from '../problems/contradictoryInput';
 import { explainReason } from '../reasons';
 import type { Kind } from './kind';
 import { length, ofQuantity } from './kind';
-import { reportStateNote } from './reportStateNote';
+import { reportStateNotes } from './reportStateNotes';
 import { runState } from './runState';
 import { stateMembers } from './stateMembers';
 
@@ -40,7 +40,7 @@ export const state: Kind = {
       scope.report(contradictoryInput.at(given.place(), { why: explainReason(result.reason) }));
       return undefined;
     }
-    for (const note of result.value.notes) reportStateNote(note, given, scope);
+    reportStateNotes(result.value.notes, given, scope);
     const { members, species } = stateMembers(result.value, leans, given, scope);
     return { kind: 'record', word: 'state', members, species, inputs: given.inputs, gas };
   },

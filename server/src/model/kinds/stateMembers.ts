@@ -1,11 +1,11 @@
 import type { Outcome } from '../../physics/outcome';
 import type { Figure as EngineFigure, StateFigures } from '../../physics/state/evaluateState';
-import { formatNumber } from '../../quantities/format';
 import { unitOf } from '../../quantities/parseUnit';
 import { kindNamed } from '../../quantities/quantityKinds';
 import { divide } from '../arithmetic';
 import { figure } from '../figures';
 import { quantityInput } from '../inputs';
+import { kelvinRange } from '../kelvins';
 import { quantity, show } from '../quantity';
 import { citation, explainReason } from '../reasons';
 import { resultNamed } from '../results';
@@ -24,12 +24,24 @@ export function stateMembers(
 ): { readonly members: Members; readonly species: ReadonlyMap<string, Members> } {
   const assumptions = assumptionsOf(given, scope);
   const members = new Map([...membersOf(figures.mixture, '', leans, assumptions), ...streamOf(given)]);
+  keepGiven(members, given);
   addMach(members);
   const species = new Map(
     [...figures.species].map(([formula, each]) => [formula, membersOf(each, `${formula}.`, leans, assumptions)]),
   );
   return { members, species };
 }
+
+/** A result that is an input is exactly that input: a half-width found by differences would be rounded. */
+function keepGiven(members: Map<string, Figure>, { inputs }: Given): void {
+  for (const [name, found] of members) {
+    const input = repeatable.has(name) ? quantityInput(inputs, name) : undefined;
+    if (!input || found.kind !== 'figure' || found.value.kind !== 'quantity') continue;
+    members.set(name, { ...found, value: { ...found.value, si: input.si, leans: input.leans } });
+  }
+}
+
+const repeatable: ReadonlySet<string> = new Set(['pressure', 'temperature', 'number_density', 'density']);
 
 function membersOf(
   figures: ReadonlyMap<string, Outcome<EngineFigure>>,
@@ -60,7 +72,7 @@ function memberOf(name: string, outcome: Outcome<EngineFigure>, leans: Leans, as
     {
       method,
       sources: sources.map(citation),
-      ...(range ? { range: `${formatNumber(range.low, 4)} to ${formatNumber(range.high, 4)} K` } : {}),
+      ...(range ? { range: kelvinRange(range) } : {}),
       assumptions,
     },
   );
