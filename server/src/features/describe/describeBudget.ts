@@ -2,6 +2,7 @@ import type { Analysis } from '../../model/analysis';
 import type { Declared } from '../../model/declare';
 import { builtInGas } from '../../model/mixture';
 import { dataTitle, spoken } from '../../model/reasons';
+import type { Gas } from '../../model/values';
 import type { Leans } from '../../model/tolerance';
 import { budget } from '../../model/tolerance';
 import { constantNamed } from '../../quantities/constants';
@@ -35,6 +36,8 @@ export function describeCause(analysis: Analysis, cause: string): string {
 
 /** Methods whose own error enters a result. */
 const methodCauses: ReadonlyMap<string, string> = new Map([
+  ['second_virial', 'error of the second virial coefficient'],
+  ['fuller_diffusion', 'error of the diffusivities from the volumes of the atoms'],
   ['eucken', 'error of the Eucken relation'],
   ['monatomic_conductivity', 'error of the conductivity from the viscosity'],
   ['mixture_viscosity', 'error of the mixing rule for viscosity'],
@@ -45,11 +48,24 @@ const methodCauses: ReadonlyMap<string, string> = new Map([
 ]);
 
 function dataCause(data: string, formula: string): string {
-  if (data !== 'viscosity' && data !== 'conductivity' && data !== 'heat_capacity')
-    return `${spoken(data)} of ${formula}`;
+  if (!isDataWithError(data)) return `${spoken(data)} of ${formula}`;
   const [species] = builtInGas(formula)?.composition.species ?? [];
-  const known = species?.[data === 'heat_capacity' ? 'heatCapacity' : data]?.uncertainty !== undefined;
-  return `${known ? 'stated' : 'assumed'} error of the ${dataTitle(data)} of ${formula}`;
+  const stated = species && dataWithError[data](species).every((known) => known?.uncertainty !== undefined);
+  return `${stated ? 'stated' : 'assumed'} error of the ${dataTitle(data)} of ${formula}`;
+}
+
+type Species = Gas['composition']['species'][number];
+
+/** The data of a species whose own error enters a result. */
+const dataWithError = {
+  viscosity: ({ viscosity }: Species) => [viscosity],
+  conductivity: ({ conductivity }: Species) => [conductivity],
+  heat_capacity: ({ heatCapacity }: Species) => [heatCapacity],
+  saturation_pressure: ({ saturation = [] }: Species) => saturation,
+};
+
+function isDataWithError(data: string): data is keyof typeof dataWithError {
+  return Object.hasOwn(dataWithError, data);
 }
 
 /** `residual.pressure` → `pressure of residual ± 10 %`, the half-width as the author wrote it. */
