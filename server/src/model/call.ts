@@ -1,11 +1,12 @@
 import { dimensionless } from '../quantities/dimension';
-import { describeDimension } from '../quantities/quantityKinds';
+import { describeDimension, kindNamed } from '../quantities/quantityKinds';
 import { nearestNames } from '../quantities/nearestNames';
-import type { Call } from '../syntax/nodes';
-import { describeValue, evaluateQuantity } from './expression';
-import type { FunctionDefinition } from './functions';
+import type { Call, Expression } from '../syntax/nodes';
+import { describeValue, evaluate, evaluateQuantity } from './expression';
+import type { GasFunction, QuantityFunction } from './functions';
 import { functionNamed, functions } from './functions';
 import { mismatch } from './mismatch';
+import { gasNamed } from './mixture';
 import { decimalComma } from './problems/decimalComma';
 import { noValue } from './problems/noValue';
 import { unknownName } from './problems/unknownName';
@@ -14,15 +15,18 @@ import { wrongType } from './problems/wrongType';
 import { show } from './quantity';
 import type { Scope } from './scope';
 import { interpolate } from './table';
-import type { Quantity } from './values';
+import type { Gas, Quantity } from './values';
 
 /** A function of quantities, or a table read at a place: `speed(1 mbar)`. */
 export function evaluateCall(node: Call, scope: Scope): Quantity | undefined {
   const definition = functionNamed(node.callee.text);
-  return definition ? evaluateFunction(node, definition, scope) : readTable(node, scope);
+  if (!definition) return readTable(node, scope);
+  return definition.takes === 'gas'
+    ? evaluateOfGas(node, definition, scope)
+    : evaluateFunction(node, definition, scope);
 }
 
-function evaluateFunction(node: Call, definition: FunctionDefinition, scope: Scope): Quantity | undefined {
+function evaluateFunction(node: Call, definition: QuantityFunction, scope: Scope): Quantity | undefined {
   const values = evaluateArguments(node, scope);
   if (!values) return undefined;
   const [least, most] = definition.arity;
@@ -37,6 +41,42 @@ function evaluateFunction(node: Call, definition: FunctionDefinition, scope: Sco
   return result;
 }
 
+function evaluateOfGas(node: Call, definition: GasFunction, scope: Scope): Quantity | undefined {
+  const { name, usage } = definition;
+  const [first, second, ...more] = node.arguments;
+  if (!first || !second || more.length > 0) {
+    scope.report(wrongArguments.at(node.span, { usage, given: node.arguments.length }));
+    return undefined;
+  }
+  const gas = gasArgument(first, name, scope);
+  const temperature = evaluateQuantity(second, scope, name);
+  const kind = kindNamed('temperature');
+  if (!temperature || !kind) return undefined;
+  const { dimension } = kind;
+  if (temperature.dimension !== dimension) {
+    mismatch(
+      second,
+      temperature,
+      { subject: `an argument of ${name}`, dimension, wants: 'a temperature', kind },
+      scope,
+    );
+    return undefined;
+  }
+  const found = gas && definition.compute(gas, temperature);
+  if (typeof found !== 'string') return found;
+  scope.report(noValue.at(node.span, { why: found }));
+  return undefined;
+}
+
+function gasArgument(node: Expression, name: string, scope: Scope): Gas | undefined {
+  if (node.kind === 'name') return gasNamed(node, scope);
+  const value = evaluate(node, scope);
+  if (!value || value.kind === 'gas') return value;
+  const found = describeValue(value);
+  scope.report(wrongType.at(node.span, { subject: `the first argument of ${name}`, wants: 'a gas', found }));
+  return undefined;
+}
+
 function evaluateArguments(node: Call, scope: Scope): readonly Quantity[] | undefined {
   const values = node.arguments.map((argument) => {
     if (argument.kind !== 'number' || !argument.comma) return evaluateQuantity(argument, scope, node.callee.text);
@@ -49,7 +89,7 @@ function evaluateArguments(node: Call, scope: Scope): readonly Quantity[] | unde
 
 function argumentsFit(
   node: Call,
-  { name, takes }: FunctionDefinition,
+  { name, takes }: QuantityFunction,
   values: readonly Quantity[],
   scope: Scope,
 ): boolean {

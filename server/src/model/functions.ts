@@ -1,19 +1,33 @@
 import { dimensionless, powerDimension } from '../quantities/dimension';
 import { map } from './arithmetic';
 import { plainNumber, quantity } from './quantity';
-import type { Quantity } from './values';
+import type { Gas, Quantity } from './values';
+import { vapourPressure } from './vapourPressure';
 
 /** A function of the expression language. */
-export interface FunctionDefinition {
+export type FunctionDefinition = QuantityFunction | GasFunction;
+
+interface Described {
   readonly name: string;
   readonly usage: string;
   readonly meaning: string;
   /** The least and the greatest number of arguments. */
   readonly arity: readonly [number, number];
+}
+
+export interface QuantityFunction extends Described {
   /** Whether the arguments are plain numbers (exp), of one dimension (max), or of any (sqrt). */
   readonly takes: 'number' | 'alike' | 'any';
   /** Undefined where the function has no value. */
   compute(first: Quantity, ...rest: readonly Quantity[]): Quantity | undefined;
+}
+
+/** A property of a gas at one temperature. */
+export interface GasFunction extends Described {
+  readonly takes: 'gas';
+  readonly quantityKind: string;
+  /** The value, or why there is none. */
+  compute(gas: Gas, temperature: Quantity): Quantity | string;
 }
 
 export const functions: readonly FunctionDefinition[] = [
@@ -83,6 +97,16 @@ export const functions: readonly FunctionDefinition[] = [
       return x.unit ? { ...rounded, unit: x.unit } : rounded;
     },
   },
+  {
+    name: 'vapour_pressure',
+    usage: 'vapour_pressure(gas, temperature)',
+    meaning:
+      'the saturation pressure of a gas over its liquid or solid; by a relative humidity or at a dew point, that of a vapour',
+    arity: [2, 2],
+    takes: 'gas',
+    quantityKind: 'pressure',
+    compute: vapourPressure,
+  },
 ];
 
 export function functionNamed(name: string): FunctionDefinition | undefined {
@@ -95,7 +119,7 @@ function ofNumber(
   value: (x: number) => number,
   derivative: (x: number) => number,
   defined: (x: number) => boolean = () => true,
-): FunctionDefinition {
+): QuantityFunction {
   return {
     name,
     usage: `${name}(x)`,

@@ -35,7 +35,8 @@ export function propagate<Result>(model: Model<Result>): Propagated<Result> {
       const amount = (above - (below.get(name) ?? NaN)) / (2 * STEP);
       if (!Number.isFinite(amount) || amount === 0) continue;
       const own = leans.get(name) ?? new Map<string, number>();
-      leans.set(name, own.set(cause, amount));
+      // An input may lean on a correlation that the model uses too; then both ways count, signs and all.
+      leans.set(name, own.set(cause, (own.get(cause) ?? 0) + amount));
     }
   };
 

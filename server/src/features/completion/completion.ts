@@ -1,4 +1,5 @@
 import type { Analysis } from '../../model/analysis';
+import { functionNamed } from '../../model/functions';
 import type { Entry, Name } from '../../syntax/nodes';
 import { followingSuggestions } from './completionFollowing';
 import { gasSuggestions } from './completionGases';
@@ -83,6 +84,10 @@ function nameSuggestions(node: Name, place: CompletionPlace): readonly Suggestio
       return node === parent.property ? memberSuggestions(parent, place) : expressionHere(place);
     case 'is':
       return node === parent.right ? wordSuggestions(parent, place) : expressionHere(place);
+    case 'call':
+      return node === parent.arguments[0] && functionNamed(parent.callee.text)?.takes === 'gas'
+        ? gasSuggestions(place)
+        : expressionHere(place);
     case 'row':
       return node === parent.at ? rowSuggestions(place) : expressionHere(place);
     default:

@@ -1,6 +1,7 @@
 import { isWanted } from './completionWanted';
 import type { Wanted } from './completionWanted';
 import { nameOf } from '../../model/declare';
+import type { FunctionDefinition } from '../../model/functions';
 import { functions } from '../../model/functions';
 import { kindOfWord } from '../../model/kinds/list';
 import { gasNames } from '../../model/mixture';
@@ -95,13 +96,19 @@ export function nameSuggestion({ name, word, value, doc }: VisibleName, place: C
 function functionSuggestions(wanted: Wanted | undefined, { following }: CompletionPlace): readonly Suggestion[] {
   const called = following.startsWith('(');
   return functions
-    .filter(({ takes }) => takes !== 'number' || !wanted || wanted.kinds.some(({ unit }) => unit === '1'))
+    .filter((definition) => !wanted || givesFitting(definition, wanted))
     .map(({ name, usage, meaning }) =>
       suggestion('function', name, usage, {
         documentation: meaning,
         ...(called ? {} : { snippet: `${name}(\${1})` }),
       }),
     );
+}
+
+/** A function of numbers gives a number, and one of a gas its own kind; the others give what they take. */
+function givesFitting(definition: FunctionDefinition, { kinds }: Wanted): boolean {
+  if (definition.takes === 'gas') return kinds.some(({ name }) => name === definition.quantityKind);
+  return definition.takes !== 'number' || kinds.some(({ unit }) => unit === '1');
 }
 
 function constSuggestion(wanted: Wanted | undefined): readonly Suggestion[] {

@@ -57,6 +57,7 @@ export function wantedAt(path: readonly Node[], scope: Scope | undefined): Wante
     case 'call': {
       const takes = functionNamed(parent.callee.text)?.takes;
       if (takes === 'number') return wantedKinds('number', 'angle');
+      if (takes === 'gas') return wantedKinds('temperature');
       return takes === 'alike' ? (like(...parent.arguments) ?? around()) : placeInTable(parent.callee.text, scope);
     }
     case 'row':

@@ -58,7 +58,7 @@ export function modelErrors({ composition, point }: StateRequest): ModelError[] 
   } else {
     errors.push(method('self_diffusion'));
   }
-  return errors.filter(({ relative }) => 0 < relative);
+  return errors.filter(isError);
 }
 
 /** Each way of finding the diffusion of a pair has its own error; among the estimates, those of polar molecules and of hard spheres are the worst. */
@@ -105,12 +105,19 @@ function heatError({ formula, heatCapacity }: Species, T: number): ModelError[] 
 
 /** Of the curve that the temperature lies on, or else the dew point; none where the vapour has neither. */
 function saturationError(species: Species, T: number, pressure: number): ModelError[] {
-  const { formula, saturation = [] } = species;
   const dew = dewPoint(species, pressure);
   const place = saturationPressure(species, T).ok ? T : dew.ok ? dew.value : undefined;
-  if (place === undefined) return [];
-  const curve = saturation.find(({ value }) => place < value.high) ?? saturation.at(-1);
-  return [{ key: `saturation_pressure:${formula}`, relative: curve?.uncertainty ?? unstated }];
+  return place === undefined ? [] : saturationErrorAt(species, place);
+}
+
+/** Of the curve that a temperature lies on, K. */
+export function saturationErrorAt({ formula, saturation = [] }: Species, T: number): ModelError[] {
+  const curve = saturation.find(({ value }) => T < value.high) ?? saturation.at(-1);
+  return [{ key: `saturation_pressure:${formula}`, relative: curve?.uncertainty ?? unstated }].filter(isError);
+}
+
+function isError({ relative }: ModelError): boolean {
+  return 0 < relative;
 }
 
 function within({ low, high }: { readonly low: number; readonly high: number }, T: number): boolean {
