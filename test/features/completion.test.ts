@@ -186,7 +186,12 @@ describe('completion after a point', () => {
     checkFirst(`${bench}let a = residual.<*>`, ['mean_free_path', 'number_density', 'pressure', 'temperature']);
     assert.equal(item(`${bench}let a = residual.<*>`, 'temperature').detail, '294.1 ± 2.0 K');
     assert.equal(item(`${bench}let a = in_foreline.<*>`, 'regime').detail, 'transitional');
-    check(`${bench}let a = foreline.<*>`, { has: ['volume', 'area'], not: ['transmission_probability'] });
+    check(`${bench}let a = foreline.<*>`, { has: ['volume', 'area', 'transmission_probability'], not: ['knudsen'] });
+  });
+
+  it('offers nominal bores where a bore is asked for, and nowhere else', () => {
+    check('tube t { bore = <*> }', { has: ['DN40', 'DN63', 'sqrt'], not: ['DN42'] });
+    check('tube t { length = <*> }', { has: ['sqrt'], not: ['DN40'] });
   });
 
   it('offers what fits first', () => {

@@ -117,7 +117,7 @@ line both = foreline & foreline
 require s.knudsen > 0.5 because "reason"
 inlet leak of air { throughput = 5 sccm }
 `;
-    assert.equal(hints(text).length, 8);
+    assert.equal(hints(text).length, 9);
     for (let length = 0; length <= text.length; length += 3) checkHints(text.slice(0, length));
     for (let start = 0; start < text.length; start += 7) checkHints(text.slice(0, start) + text.slice(start + 1));
   });

@@ -5,6 +5,7 @@ import { speciesByName, speciesList } from '../../server/src/physics/species/lis
 import { dragSources } from '../../server/src/physics/particles/sphereDrag';
 import { kineticSources } from '../../server/src/physics/rarefied/kineticCoefficients';
 import { endSources } from '../../server/src/physics/rarefied/longConductance';
+import { transmissionSources } from '../../server/src/physics/passages/transmission';
 import { sources } from '../../server/src/physics/sources';
 import { statePropertyNamed, stateProperties } from '../../server/src/physics/state/properties';
 import { measuredVirial } from '../../server/src/physics/thermo/measuredVirial';
@@ -41,7 +42,7 @@ describe('lists', () => {
     const methods = figures(mixture({ N2: 0.5, Ar: 0.5 }), 300, 1);
     const stated = figures(pure(statedSpecies(polar)), 300, 1);
     const cited = data + JSON.stringify([everyFigure(methods), everyFigure(stated)]);
-    const elsewhere = JSON.stringify([kineticSources, endSources, dragSources]);
+    const elsewhere = JSON.stringify([kineticSources, endSources, dragSources, transmissionSources]);
     for (const [id, { authors, year }] of Object.entries(sources)) {
       const surname = authors.split(/[,;]/)[0]!;
       const mentioned = new RegExp(`${surname}[^'"]{0,10}${year}`, 'u').test(cited);

@@ -3,6 +3,7 @@ import type { Declared } from '../model/declare';
 import { functionNamed } from '../model/functions';
 import { kindOfWord } from '../model/kinds/list';
 import { builtInGas } from '../model/mixture';
+import { nominalBore } from '../model/nominalBores';
 import type { Declaration, Node } from '../syntax/nodes';
 import { takesWord } from './meaning';
 import type { Token } from './tokens';
@@ -163,7 +164,8 @@ function meaningOfProperty(text: string): Meaning {
 function meaningOfReference(text: string, analysis: Analysis): Meaning | undefined {
   const declaration = analysis.find(text)?.declared.item.declaration;
   if (declaration) return isGas(declaration) ? ['gas'] : ['variable'];
-  return builtInGas(text) ? ['gas', 'defaultLibrary'] : undefined;
+  if (builtInGas(text)) return ['gas', 'defaultLibrary'];
+  return nominalBore(text) ? ['variable', 'readonly', 'defaultLibrary'] : undefined;
 }
 
 function isGas({ kind, word }: Declaration): boolean {

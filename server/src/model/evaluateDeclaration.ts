@@ -1,15 +1,6 @@
 import { nearestNames } from '../quantities/nearestNames';
 import { describeDimension, describeUnit, kindNamed, quantityKinds } from '../quantities/quantityKinds';
-import type {
-  Declaration,
-  DisplayDeclaration,
-  Item,
-  LineDeclaration,
-  Name,
-  Route,
-  SiteDeclaration,
-  ThingDeclaration,
-} from '../syntax/nodes';
+import type { Declaration, DisplayDeclaration, Item, Name, SiteDeclaration, ThingDeclaration } from '../syntax/nodes';
 import { evaluateAssumption } from './assumption';
 import type { Evaluated, Outcome } from './evaluated';
 import { blocked, failed, none } from './evaluated';
@@ -17,6 +8,7 @@ import { describeValue, evaluate } from './expression';
 import { placeOf, readInputs } from './inputs';
 import type { HeadDefinition, Kind } from './kinds/kind';
 import { kindOfWord, kinds } from './kinds/list';
+import { checkRoute, evaluateLine } from './kinds/line';
 import { computeSite } from './kinds/site';
 import { statements } from './kinds/statements';
 import { readUnit } from './literal';
@@ -217,36 +209,6 @@ function reportForeignItems(node: ThingDeclaration, kind: Kind, scope: Declarati
         wrongType.at(item.span, { subject: kind.title, wants: 'inputs such as key = value', found: `“${item.kind}”` }),
       );
     }
-  }
-}
-
-function evaluateLine(node: LineDeclaration, scope: DeclarationScope): Value | undefined {
-  if (!checkRoute(node.route, scope)) return undefined;
-  scope.report(notComputedYet.at(node.word.span, { what: 'a line' }));
-  return { kind: 'pending', word: 'line' };
-}
-
-/** Whether every name on a route is a passage. */
-function checkRoute(route: Route | { kind: 'mixture' }, scope: DeclarationScope): boolean {
-  switch (route.kind) {
-    case 'series':
-      return route.stages.map((stage) => checkRoute(stage, scope)).every(Boolean);
-    case 'parallel':
-      return route.branches.map((branch) => checkRoute(branch, scope)).every(Boolean);
-    case 'name': {
-      const value = evaluateName(route, scope, 'passage');
-      if (!value) return false;
-      const passage =
-        (value.kind === 'record' || value.kind === 'pending') &&
-        (value.word === 'line' || kindOfWord(value.word)?.role === 'geometry');
-      if (!passage)
-        scope.report(
-          wrongType.at(route.span, { subject: 'this place', wants: 'a passage', found: describeValue(value) }),
-        );
-      return passage;
-    }
-    default:
-      return false;
   }
 }
 

@@ -4,6 +4,7 @@ import { unitOf } from '../quantities/parseUnit';
 import type { Member, Name } from '../syntax/nodes';
 import { describeValue, evaluate } from './expression';
 import { laterResults } from './kinds/list';
+import { nominalBore, nominalBoreNames } from './nominalBores';
 import { noData } from './problems/noData';
 import { notComputedYet } from './problems/notComputedYet';
 import { unknownName } from './problems/unknownName';
@@ -17,17 +18,13 @@ import type { Members, Quantity, Record, Value } from './values';
 export function evaluateName(node: Name, scope: Scope, what = 'value'): Value | undefined {
   const found = scope.lookUp(node.text);
   if (found.kind === 'found') return found.value;
-  if (found.kind === 'unknown' && NOMINAL_BORE.test(node.text)) {
-    scope.report(notComputedYet.at(node.span, { what: `the nominal bore ${node.text}` }));
-  } else if (found.kind === 'unknown') {
-    const nearest = nearestNames(node.text, scope.names());
-    scope.report(unknownName.at(node.span, { what, name: node.text, nearest }));
-  }
+  if (found.kind === 'blocked') return undefined;
+  const bore = nominalBore(node.text);
+  if (bore) return bore;
+  const nearest = nearestNames(node.text, /^DN\d/.test(node.text) ? nominalBoreNames : scope.names());
+  scope.report(unknownName.at(node.span, { what, name: node.text, nearest }));
   return undefined;
 }
-
-/** Bores by the flange standards: DN40. */
-const NOMINAL_BORE = /^DN\d+$/;
 
 /** `foreline.bore`, `residual.Ar.partial_pressure`, `const.k` */
 export function evaluateMember(node: Member, scope: Scope): Value | undefined {

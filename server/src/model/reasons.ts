@@ -26,11 +26,17 @@ export function explainReason(reason: Reason): string {
         quantity === 'temperature' ? `${formatNumber(critical, 4)} K` : `${formatNumber(critical / 1e5, 4)} bar`;
       return `above its critical ${quantity} of ${limit}, ${species} does not condense`;
     }
+    case 'diffuse-only':
+      return `free-molecular flow through ${withArticle(reason.passage)} is known for wholly diffuse walls only; leave its accommodation out`;
     case 'empty-composition':
       return 'the gas has no parts';
     case 'fraction-sum':
       return `the fractions add up to ${formatNumber(100 * reason.sum, 6)} %`;
   }
+}
+
+function withArticle(noun: string): string {
+  return /^[aeiou]/.test(noun) ? `an ${noun}` : `a ${noun}`;
 }
 
 export function dataTitle(data: DataKind): string {

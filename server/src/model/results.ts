@@ -76,6 +76,7 @@ const meanings: Readonly<{ [name: string]: string | Omit<ResultDefinition, 'name
   outer_area: { quantityKind: 'area', meaning: 'the area of the outer wall' },
   thickness: { symbol: 't', quantityKind: 'length', meaning: 'the thickness of the wall' },
   area: { symbol: 'A', quantityKind: 'area', meaning: 'the area of the section' },
+  outlet_area: { quantityKind: 'area', meaning: 'the area of the section where the gas leaves' },
   volume: { symbol: 'V', quantityKind: 'volume', meaning: 'the volume inside' },
   wall_area: { symbol: 'S', quantityKind: 'area', meaning: 'the area of the walls' },
   hydraulic_diameter: { symbol: 'd_h', quantityKind: 'length', meaning: 'four times the section over its rim' },

@@ -44,6 +44,8 @@ export type Reason =
       readonly quantity: 'temperature' | 'pressure';
       readonly critical: number;
     }
+  /** The passage is known with wholly diffuse walls only. */
+  | { readonly kind: 'diffuse-only'; readonly passage: string }
   /** The composition names no species. */
   | { readonly kind: 'empty-composition' }
   /** The fractions do not add up to one. */

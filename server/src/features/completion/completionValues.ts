@@ -1,5 +1,6 @@
 import type { Key } from '../../model/kinds/kind';
 import type { MixturePart, Name } from '../../syntax/nodes';
+import { boreSuggestions } from './completionBores';
 import { gasSuggestions } from './completionGases';
 import { relationSuggestions } from './completionHeads';
 import type { Suggestion } from './completionItem';
@@ -14,7 +15,7 @@ export function valueSuggestions(key: Key, place: CompletionPlace): readonly Sug
   const wanted = wantedAt(place.path, place.scope);
   switch (type.kind) {
     case 'quantity':
-      return expressionSuggestions(wanted, place);
+      return [...expressionSuggestions(wanted, place), ...boreSuggestions(key)];
     case 'word':
       return type.words.map((word) => suggestion('word', word, key.meaning));
     case 'words':

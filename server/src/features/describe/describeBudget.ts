@@ -45,9 +45,12 @@ const methodCauses: ReadonlyMap<string, string> = new Map([
   ['self_diffusion', 'error of the diffusivity from the viscosity'],
   ['measured_diffusion', 'error of the measured diffusivities'],
   ['pair_diffusion', 'error of the estimated diffusivities'],
+  ['series_rule', 'error of the rule for passages in series'],
 ]);
 
 function dataCause(data: string, formula: string): string {
+  if (data === 'transmission')
+    return `error of the transmission probability of a ${formula}`.replace(/a (?=[aeiou]\w*$)/, 'an ');
   if (!isDataWithError(data)) return `${spoken(data)} of ${formula}`;
   const [species] = builtInGas(formula)?.composition.species ?? [];
   const stated = species && dataWithError[data](species).every((known) => known?.uncertainty !== undefined);

@@ -1,6 +1,7 @@
 import type { Place } from '../../model/evaluation';
 import { kindOfWord } from '../../model/kinds/list';
 import { builtInGas } from '../../model/mixture';
+import { nominalBoreMeaning } from '../../model/nominalBores';
 import type { Name } from '../../syntax/nodes';
 import { describeShortly } from '../describe/describeShortly';
 import { hoverSpecies, shareNote } from './hoverGas';
@@ -20,6 +21,8 @@ export function hoverName(node: Name, place: HoverPlace): string | undefined {
   const gas = builtInGas(node.text);
   const [species] = gas?.composition.species ?? [];
   if (species) return hoverSpecies(species, shareHere(species.formula, place), options);
+  const bore = nominalBoreMeaning(node.text);
+  if (bore !== undefined) return meaningOf(node.text, bore);
   if (node.text === 'const') return meaningOf('const', 'the physical constants, as in const.k');
   return hoverRegime(node, place);
 }

@@ -1,8 +1,10 @@
+import { annulusTransmission } from '../../physics/passages/annulus';
 import { add, divide, multiply, subtract } from '../arithmetic';
 import { plainNumber, show } from '../quantity';
-import { given, mustBe, passageRecord } from './passageRecord';
-import type { Kind } from './kind';
 import { accommodation, length } from './kind';
+import type { Kind } from './kind';
+import { given, mustBe, passageRecord } from './passageRecord';
+import { accommodationOf, transmissionFigure, wallAssumptions } from './transmission';
 
 export const annulus: Kind = {
   word: 'annulus',
@@ -22,7 +24,7 @@ export const annulus: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['transmission_probability'],
+  later: [],
   snippet: 'annulus ${1:name} { inner = ${2:30 mm}, outer = ${3:40 mm}, length = ${4:0.5 m} }',
   compute: (declared, scope) => {
     const { inputs } = declared;
@@ -48,6 +50,13 @@ export const annulus: Kind = {
         characteristic_length: gap,
         aspect_ratio: divide(along, gap),
       },
+      others: [
+        transmissionFigure(
+          [inner, outer, along, accommodationOf(inputs)],
+          (inner, outer, length, accommodation) => annulusTransmission({ inner, outer, length, accommodation }),
+          wallAssumptions(inputs),
+        ),
+      ],
     });
   },
 };

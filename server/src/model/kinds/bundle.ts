@@ -2,9 +2,9 @@ import { multiply } from '../arithmetic';
 import { figure } from '../figures';
 import { quantityInput } from '../inputs';
 import type { Figure, Quantity } from '../values';
-import { mustBe, passageRecord } from './passageRecord';
-import type { Kind } from './kind';
 import { ofQuantity } from './kind';
+import type { Kind } from './kind';
+import { mustBe, passageRecord } from './passageRecord';
 
 export const bundle: Kind = {
   word: 'bundle',
@@ -45,7 +45,7 @@ export const bundle: Kind = {
 };
 
 /** What all the passages have together. */
-const SUMS: readonly string[] = ['area', 'volume', 'wall_area'];
+const SUMS: readonly string[] = ['area', 'outlet_area', 'volume', 'wall_area'];
 
 /** What is the same of one passage as of all. */
 const KEPT: readonly string[] = [

@@ -1,11 +1,11 @@
-import { divide, map, multiply } from '../arithmetic';
-import { plainNumber } from '../quantity';
 import { powerDimension } from '../../quantities/dimension';
+import { divide, map, multiply } from '../arithmetic';
 import { figures } from '../figures';
 import { quantityInput } from '../inputs';
+import { plainNumber } from '../quantity';
 import type { Members, Quantity } from '../values';
-import type { Kind } from './kind';
 import { ofQuantity } from './kind';
+import type { Kind } from './kind';
 
 export const chamber: Kind = {
   word: 'chamber',

@@ -1,10 +1,12 @@
-import { add, divide, map, multiply, subtract } from '../arithmetic';
+import { coneTransmission } from '../../physics/passages/cone';
 import { powerDimension } from '../../quantities/dimension';
+import { add, divide, map, multiply, subtract } from '../arithmetic';
 import { plainNumber } from '../quantity';
 import type { Quantity } from '../values';
-import { given, passageRecord } from './passageRecord';
-import type { Kind } from './kind';
 import { accommodation, length } from './kind';
+import type { Kind } from './kind';
+import { given, passageRecord } from './passageRecord';
+import { accommodationOf, transmissionFigure, wallAssumptions } from './transmission';
 
 export const cone: Kind = {
   word: 'cone',
@@ -24,7 +26,7 @@ export const cone: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['transmission_probability'],
+  later: [],
   snippet: 'cone ${1:name} { inlet_bore = ${2:40 mm}, outlet_bore = ${3:25 mm}, length = ${4:80 mm} }',
   compute: ({ inputs }) => {
     const sizes = given(inputs, 'inlet_bore', 'outlet_bore', 'length');
@@ -39,11 +41,20 @@ export const cone: Kind = {
         outlet_bore: outlet,
         length: along,
         area: multiply(plainNumber(Math.PI / 4), multiply(inlet, inlet)),
+        outlet_area: multiply(plainNumber(Math.PI / 4), multiply(outlet, outlet)),
         volume: multiply(plainNumber(Math.PI / 12), multiply(squares, along)),
         wall_area: multiply(plainNumber(Math.PI / 2), multiply(add(inlet, outlet), slant(inlet, outlet, along))),
         characteristic_length: smaller,
         aspect_ratio: divide(along, smaller),
       },
+      others: [
+        transmissionFigure(
+          [inlet, outlet, along, accommodationOf(inputs)],
+          (inletBore, outletBore, length, accommodation) =>
+            coneTransmission({ inletBore, outletBore, length, accommodation }),
+          wallAssumptions(inputs),
+        ),
+      ],
     });
   },
 };

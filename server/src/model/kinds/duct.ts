@@ -1,8 +1,10 @@
+import { ductTransmission } from '../../physics/passages/duct';
 import { add, divide, multiply } from '../arithmetic';
 import { plainNumber } from '../quantity';
-import { given, passageRecord } from './passageRecord';
-import type { Kind } from './kind';
 import { accommodation, length } from './kind';
+import type { Kind } from './kind';
+import { given, passageRecord } from './passageRecord';
+import { accommodationOf, transmissionFigure, wallAssumptions } from './transmission';
 
 export const duct: Kind = {
   word: 'duct',
@@ -22,7 +24,7 @@ export const duct: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['transmission_probability'],
+  later: [],
   snippet: 'duct ${1:name} { width = ${2:60 mm}, height = ${3:20 mm}, length = ${4:1 m} }',
   compute: ({ inputs }) => {
     const sides = given(inputs, 'width', 'height', 'length');
@@ -44,6 +46,13 @@ export const duct: Kind = {
         characteristic_length: smaller,
         aspect_ratio: divide(along, smaller),
       },
+      others: [
+        transmissionFigure(
+          [width, height, along, accommodationOf(inputs)],
+          (width, height, length, accommodation) => ductTransmission({ width, height, length, accommodation }),
+          wallAssumptions(inputs),
+        ),
+      ],
     });
   },
 };

@@ -63,5 +63,6 @@ export function laterResults(word: string): readonly string[] {
 /** The results that the hint of a declaration shows unless a setting says otherwise. */
 export function hintResults(word: string): readonly string[] {
   if (word === 'site') return siteResults.hint;
+  if (word === 'line') return ['transmission_probability', 'volume'];
   return word === 'gas' ? ['molar_mass'] : (byWord.get(word)?.hint ?? []);
 }

@@ -1,12 +1,14 @@
-import { divide, map, multiply } from '../arithmetic';
+import { orificeTransmission } from '../../physics/passages/orifice';
 import { powerDimension } from '../../quantities/dimension';
+import { divide, map, multiply } from '../arithmetic';
 import { figures } from '../figures';
 import { quantityInput } from '../inputs';
 import { plainNumber } from '../quantity';
 import { exact } from '../tolerance';
 import type { Quantity } from '../values';
-import type { Kind } from './kind';
 import { accommodation, length, ofQuantity } from './kind';
+import type { Kind } from './kind';
+import { accommodationOf, transmissionFigure, wallAssumptions } from './transmission';
 
 export const orifice: Kind = {
   word: 'orifice',
@@ -24,7 +26,7 @@ export const orifice: Kind = {
   ],
   needs: [{ count: 1, of: ['bore', 'area'] }],
   hint: ['area'],
-  later: ['transmission_probability'],
+  later: [],
   snippet: 'orifice ${1:name} { bore = ${2:5 mm} }',
   compute: ({ inputs }) => {
     const given = quantityInput(inputs, 'bore');
@@ -37,23 +39,32 @@ export const orifice: Kind = {
       word: 'orifice',
       inputs,
       species: new Map(),
-      members: figures(
-        'geometry of a round hole',
-        {
-          bore,
-          thickness,
-          area,
-          volume: multiply(area, thickness),
-          wall_area: multiply(plainNumber(Math.PI), multiply(bore, thickness)),
-          hydraulic_diameter: bore,
-          characteristic_length: bore,
-          aspect_ratio: divide(thickness, bore),
-        },
-        inputs.has('thickness') ? [] : ['a thin wall (no thickness given)'],
-      ),
+      members: new Map([
+        ...figures(
+          'geometry of a round hole',
+          {
+            bore,
+            thickness,
+            area,
+            volume: multiply(area, thickness),
+            wall_area: multiply(plainNumber(Math.PI), multiply(bore, thickness)),
+            hydraulic_diameter: bore,
+            characteristic_length: bore,
+            aspect_ratio: divide(thickness, bore),
+          },
+          inputs.has('thickness') ? [] : THIN,
+        ),
+        transmissionFigure(
+          [bore, thickness, accommodationOf(inputs)],
+          (bore, thickness, accommodation) => orificeTransmission({ bore, thickness, accommodation }),
+          inputs.has('thickness') ? wallAssumptions(inputs) : THIN,
+        ),
+      ]),
     };
   },
 };
+
+const THIN = ['a thin wall (no thickness given)'];
 
 /** d = √(4A/π) */
 function diameterOf(area: Quantity): Quantity {

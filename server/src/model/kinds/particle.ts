@@ -1,8 +1,8 @@
 import { multiply } from '../arithmetic';
 import { plainNumber } from '../quantity';
-import { given, passageRecord } from './passageRecord';
-import type { Kind } from './kind';
 import { length, ofQuantity } from './kind';
+import type { Kind } from './kind';
+import { given, passageRecord } from './passageRecord';
 
 export const particle: Kind = {
   word: 'particle',

@@ -1,8 +1,10 @@
+import { slitTransmission } from '../../physics/passages/slit';
 import { divide, multiply } from '../arithmetic';
 import { plainNumber } from '../quantity';
-import { given, passageRecord } from './passageRecord';
-import type { Kind } from './kind';
 import { accommodation, length } from './kind';
+import type { Kind } from './kind';
+import { given, passageRecord } from './passageRecord';
+import { accommodationOf, transmissionFigure, wallAssumptions } from './transmission';
 
 export const slit: Kind = {
   word: 'slit',
@@ -22,7 +24,7 @@ export const slit: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['area', 'volume'],
-  later: ['transmission_probability'],
+  later: [],
   snippet: 'slit ${1:name} { height = ${2:0.1 mm}, width = ${3:100 mm}, length = ${4:10 mm} }',
   compute: ({ inputs }) => {
     const sides = given(inputs, 'height', 'width', 'length');
@@ -42,6 +44,13 @@ export const slit: Kind = {
         characteristic_length: height,
         aspect_ratio: divide(along, height),
       },
+      others: [
+        transmissionFigure(
+          [height, along, accommodationOf(inputs)],
+          (height, length, accommodation) => slitTransmission({ height, length, accommodation }),
+          wallAssumptions(inputs),
+        ),
+      ],
     });
   },
 };

@@ -1,9 +1,11 @@
-import { multiply, divide } from '../arithmetic';
+import { tubeTransmission } from '../../physics/passages/tube';
+import { divide, multiply } from '../arithmetic';
 import { figures } from '../figures';
-import { plainNumber } from '../quantity';
 import { quantityInput } from '../inputs';
-import type { Kind } from './kind';
+import { plainNumber } from '../quantity';
 import { accommodation, length } from './kind';
+import type { Kind } from './kind';
+import { accommodationOf, transmissionFigure, wallAssumptions } from './transmission';
 
 export const tube: Kind = {
   word: 'tube',
@@ -24,7 +26,7 @@ export const tube: Kind = {
     { count: 1, of: ['length'] },
   ],
   hint: ['volume', 'area'],
-  later: ['transmission_probability'],
+  later: [],
   snippet: 'tube ${1:name} {\n  bore   = ${2:40 mm}\n  length = ${3:1 m}\n}',
   compute: ({ inputs }) => {
     const bore = quantityInput(inputs, 'bore');
@@ -36,16 +38,23 @@ export const tube: Kind = {
       word: 'tube',
       inputs,
       species: new Map(),
-      members: figures('geometry of a circular cylinder', {
-        bore,
-        length: along,
-        area,
-        volume: multiply(area, along),
-        wall_area: multiply(plainNumber(Math.PI), multiply(bore, along)),
-        hydraulic_diameter: bore,
-        characteristic_length: bore,
-        aspect_ratio: divide(along, bore),
-      }),
+      members: new Map([
+        ...figures('geometry of a circular cylinder', {
+          bore,
+          length: along,
+          area,
+          volume: multiply(area, along),
+          wall_area: multiply(plainNumber(Math.PI), multiply(bore, along)),
+          hydraulic_diameter: bore,
+          characteristic_length: bore,
+          aspect_ratio: divide(along, bore),
+        }),
+        transmissionFigure(
+          [bore, along, accommodationOf(inputs)],
+          (bore, length, accommodation) => tubeTransmission({ bore, length, accommodation }),
+          wallAssumptions(inputs),
+        ),
+      ]),
     };
   },
 };

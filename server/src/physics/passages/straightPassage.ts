@@ -195,3 +195,19 @@ function add(sums: Float64Array, index: number, amount: number): void {
 function product(a: Float64Array, j: number, b: Float64Array, k: number): number {
   return (a[j] ?? 0) * (b[k] ?? 0);
 }
+
+/**
+ * The value of E(u) for the straight line u = x/l, which is never below the transmission probability and meets it in short and
+ * in long passages:
+ *
+ *   ∫₀^l exchange (z²/l − z³/(3l²)) dz + ∫_l^∞ exchange (z − l/3) dz .
+ */
+export function straightLineTransmission(exchange: (z: number) => number, l: number): number {
+  const near = onPanels(gradedBreaks(0, l, Math.min(l, FIRST), GROWTH), LINE_POINTS);
+  return (
+    integrate(near, (z) => (exchange(z) * z * z * (1 - z / (3 * l))) / l) +
+    integrate(beyond(l, LINE_POINTS), (z) => exchange(z) * (z - l / 3))
+  );
+}
+
+const LINE_POINTS = 7;
