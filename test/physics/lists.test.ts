@@ -1,4 +1,5 @@
 import assert from 'node:assert/strict';
+import { heatSources } from '../../server/src/physics/heat/conductHeat';
 import { pure } from '../../server/src/physics/composition';
 import { statedSpecies } from '../../server/src/physics/species/statedSpecies';
 import { speciesByName, speciesList } from '../../server/src/physics/species/list';
@@ -42,7 +43,7 @@ describe('lists', () => {
     const methods = figures(mixture({ N2: 0.5, Ar: 0.5 }), 300, 1);
     const stated = figures(pure(statedSpecies(polar)), 300, 1);
     const cited = data + JSON.stringify([everyFigure(methods), everyFigure(stated)]);
-    const elsewhere = JSON.stringify([kineticSources, endSources, dragSources, transmissionSources]);
+    const elsewhere = JSON.stringify([kineticSources, endSources, dragSources, transmissionSources, heatSources]);
     for (const [id, { authors, year }] of Object.entries(sources)) {
       const surname = authors.split(/[,;]/)[0]!;
       const mentioned = new RegExp(`${surname}[^'"]{0,10}${year}`, 'u').test(cited);

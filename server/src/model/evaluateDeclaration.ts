@@ -168,12 +168,17 @@ function readHead(node: ThingDeclaration, kind: Kind, scope: DeclarationScope): 
     return undefined;
   }
   if (definition.wants === 'route') return checkRoute(head.target, scope) ? {} : undefined;
-  if (head.target.kind !== 'mixture') return undefined;
   if (definition.wants === 'gas') {
-    const gas = evaluateMixture(head.target, scope);
+    const gas = head.target.kind === 'mixture' ? evaluateMixture(head.target, scope) : undefined;
     return gas && { gas };
   }
-  const from = recordNamed(head.target.parts[0]?.name, definition, scope);
+  const { target } = head;
+  if (target.kind === 'series' || target.kind === 'parallel') {
+    const wants = `a ${either(definition.words ?? [])}`;
+    scope.report(wrongType.at(target.span, { subject: `“${definition.relation}”`, wants, found: 'several passages' }));
+    return undefined;
+  }
+  const from = recordNamed(target.kind === 'mixture' ? target.parts[0]?.name : target, definition, scope);
   return from && { from };
 }
 

@@ -544,4 +544,29 @@ export const sources = {
     year: 1983,
     published: 'Elsevier',
   },
+  'Knudsen 1911': {
+    authors: 'Knudsen, M.',
+    title: 'Die molekulare Wärmeleitung der Gase und der Akkommodationskoeffizient',
+    year: 1911,
+    published: 'Ann. Phys. 339, 593',
+    doi: '10.1002/andp.19113390402',
+  },
+  'Welander 1954': {
+    authors: 'Welander, P.',
+    title: 'On the temperature jump in a rarefied gas',
+    year: 1954,
+    published: 'Ark. Fys. 7, 507',
+  },
+  'Barichello & Siewert 2000': {
+    authors: 'Barichello, L. B.; Siewert, C. E.',
+    title: 'The temperature-jump problem in rarefied-gas dynamics',
+    year: 2000,
+    published: 'Eur. J. Appl. Math. 11, 353',
+  },
+  'Bassanini 1967': {
+    authors: 'Bassanini, P.; Cercignani, C.; Pagani, C. D.',
+    title: 'Comparison of kinetic theory analyses of linearized heat transfer between parallel plates',
+    year: 1967,
+    published: 'Int. J. Heat Mass Transfer 10, 447',
+  },
 } as const satisfies Record<string, Source>;

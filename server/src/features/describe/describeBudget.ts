@@ -46,6 +46,7 @@ const methodCauses: ReadonlyMap<string, string> = new Map([
   ['measured_diffusion', 'error of the measured diffusivities'],
   ['pair_diffusion', 'error of the estimated diffusivities'],
   ['series_rule', 'error of the rule for passages in series'],
+  ['heat_transition', 'error of the conduction between its limits'],
 ]);
 
 function dataCause(data: string, formula: string): string {
