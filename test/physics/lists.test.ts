@@ -1,5 +1,5 @@
 import assert from 'node:assert/strict';
-import { heatSources } from '../../server/src/physics/heat/conductHeat';
+import { heatSources } from '../../server/src/physics/heat/heatProvenance';
 import { pure } from '../../server/src/physics/composition';
 import { statedSpecies } from '../../server/src/physics/species/statedSpecies';
 import { speciesByName, speciesList } from '../../server/src/physics/species/list';

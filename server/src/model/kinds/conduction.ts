@@ -1,7 +1,9 @@
 import type { ConductedHeat } from '../../physics/heat/conductHeat';
 import type { HeatNotes } from '../../physics/heat/heatNotes';
+import type { HeatProvenance } from '../../physics/heat/heatProvenance';
 import { heatProvenance } from '../../physics/heat/heatProvenance';
 import type { Note } from '../../physics/outcome';
+import type { Provenance as EngineProvenance } from '../../physics/state/provenance';
 import { formatNumber } from '../../quantities/format';
 import { kindNamed } from '../../quantities/quantityKinds';
 import { figure } from '../figures';
@@ -104,45 +106,57 @@ function membersOf(
   inputs: ConductionInputs,
   scope: Scope,
 ): Members {
-  const { method, sources, range } = heatProvenance(inputs.gas.composition);
-  const provenance: Provenance = {
-    method,
-    sources: sources.map(citation),
-    ...(range
-      ? { range: `${formatNumber(range.low, 4)} to ${formatNumber(range.high, 4)} K; ${SMALL}` }
-      : { range: SMALL }),
-    assumptions: [...inputs.assumptions, ...ALWAYS],
-  };
+  const provenances = provenancesOf(inputs);
   const members = new Map<string, Figure>();
   for (const [name, value] of numbersOf(heat)) {
-    const { quantityKind = 'number' } = resultNamed(name) ?? {};
-    const kind = kindNamed(quantityKind);
+    const kind = kindNamed(resultNamed(name)?.quantityKind ?? 'number');
     if (!kind) continue;
     const shown = { ...quantity(value, kind.dimension, leans.get(name) ?? exact), quantityKind: kind.name };
-    members.set(name, figure(shown, { ...provenance, method: methods[name] ?? method }));
+    members.set(name, figure(shown, provenances[GROUPS[name] ?? 'heat']));
   }
   for (const [name, each] of regimeMembers(heat, scope)) members.set(name, each);
   return members;
 }
 
-const SMALL = 'temperature differences small against the mean, exact at any in the two limits';
-
-const ALWAYS = [
-  'the gas is at rest: no convection',
-  'no radiation and no heat through supports',
-  'walls send molecules back in all directions, with α of the energy exchanged',
-];
-
-const JUMP = 'kinetic jump coefficient ζ_T = 1.954 of a diffuse wall, and (1 − α)/α of the free-molecular resistance';
-
-/** Where a result comes about by less than the whole method. */
-const methods: Readonly<{ [name: string]: string }> = {
-  jump_length_hot: JUMP,
-  jump_length_cold: JUMP,
-  free_molecular_heat_flow: 'free flight between walls with energy accommodation, Knudsen, summed over the species',
-  continuum_heat_flow: 'Fourier’s law with the conductivity integrated between the wall temperatures',
-  knudsen: 'Kn = λ/ℓ on the distance of the walls, at their mean temperature',
+/** How each result comes about, where it is not as the heat itself. */
+const GROUPS: Readonly<{ [name: string]: keyof HeatProvenance }> = {
+  jump_length_hot: 'jumps',
+  jump_length_cold: 'jumps',
+  free_molecular_heat_flow: 'freeFlight',
+  continuum_heat_flow: 'continuum',
+  knudsen: 'knudsen',
 };
+
+function provenancesOf({ gas, assumptions }: ConductionInputs): {
+  readonly [group in keyof HeatProvenance]: Provenance;
+} {
+  const { heat, jumps, freeFlight, continuum, knudsen } = heatProvenance(gas.composition);
+  const { walls, pressure } = assumptions;
+  const reflecting = [...walls, pressure, 'walls send molecules back in all directions'];
+  const small = 'between the limits, temperature differences small against the mean';
+  return {
+    heat: told(heat, [...reflecting, 'no convection', 'no radiation, no heat through supports'], small),
+    jumps: told(jumps, reflecting),
+    freeFlight: told(freeFlight, [...walls, pressure]),
+    continuum: told(continuum, ['no convection']),
+    knudsen: told(knudsen, [pressure]),
+  };
+}
+
+function told(
+  { method, sources, range }: EngineProvenance,
+  assumptions: readonly string[],
+  limits?: string,
+): Provenance {
+  const kelvins = range ? [`${formatNumber(range.low, 4)} to ${formatNumber(range.high, 4)} K`] : [];
+  const ranges = [...kelvins, ...(limits === undefined ? [] : [limits])];
+  return {
+    method,
+    sources: sources.map(citation),
+    assumptions,
+    ...(ranges.length > 0 ? { range: ranges.join('; ') } : {}),
+  };
+}
 
 function regimeMembers({ knudsen }: ConductedHeat, scope: Scope): readonly (readonly [string, Figure])[] {
   if (!knudsen.ok) {

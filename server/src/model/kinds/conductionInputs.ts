@@ -22,7 +22,7 @@ export interface ConductionInputs {
   readonly hotAccommodation: Quantity;
   readonly coldAccommodation: Quantity;
   /** What was not written, in words. */
-  readonly assumptions: readonly string[];
+  readonly assumptions: { readonly walls: readonly string[]; readonly pressure: string };
 }
 
 /** Reads what the keys alone cannot tell: what belongs together, and what cannot be. */
@@ -49,16 +49,18 @@ export function conductionInputs(declared: Given, scope: Scope): ConductionInput
     hotWall,
     hot,
     cold,
-    ...filling,
-    ...accommodation,
-    assumptions: [...side, ...accommodation.assumptions, ...filling.assumptions],
+    gas: filling.gas,
+    pressure: filling.pressure,
+    hotAccommodation: accommodation.hot,
+    coldAccommodation: accommodation.cold,
+    assumptions: { walls: [...side, ...accommodation.assumed], pressure: filling.assumed },
   };
 }
 
 interface Filling {
   readonly gas: Gas;
   readonly pressure: Quantity;
-  readonly assumptions: readonly string[];
+  readonly assumed: string;
 }
 
 /** The gas and its pressure, by themselves or as those of a state. */
@@ -75,7 +77,7 @@ function fillingOf({ inputs, node, place }: Given, scope: Scope): Filling | unde
       return undefined;
     }
     if (!state.gas || pressure?.kind !== 'figure' || pressure.value.kind !== 'quantity') return undefined;
-    return { gas: state.gas, pressure: pressure.value, assumptions: [`${AT_REST}; the state gives it and the gas`] };
+    return { gas: state.gas, pressure: pressure.value, assumed: `${AT_REST}, whatever that of the state` };
   }
   const pressure = quantityInput(inputs, 'pressure');
   if (!pressure) return undefined;
@@ -84,12 +86,16 @@ function fillingOf({ inputs, node, place }: Given, scope: Scope): Filling | unde
     scope.report(missingInput.at(place(), { what: 'a conduction', count: 1, of: ['gas'], given: [], fixes }));
     return undefined;
   }
-  return { gas, pressure, assumptions: [AT_REST] };
+  return { gas, pressure, assumed: AT_REST };
 }
 
-const AT_REST = 'the pressure is that of the gas at rest at the mean of the wall temperatures';
+const AT_REST = 'the pressure is that of the gas at rest at the mean temperature of the walls';
 
-type Accommodation = Pick<ConductionInputs, 'hotAccommodation' | 'coldAccommodation' | 'assumptions'>;
+interface Accommodation {
+  readonly hot: Quantity;
+  readonly cold: Quantity;
+  readonly assumed: readonly string[];
+}
 
 function accommodationOf(declared: Given, scope: Scope): Accommodation | undefined {
   const { inputs, node, place } = declared;
@@ -106,11 +112,11 @@ function accommodationOf(declared: Given, scope: Scope): Accommodation | undefin
   const both = quantityInput(inputs, 'accommodation');
   const hot = quantityInput(inputs, 'hot_accommodation') ?? both;
   const cold = quantityInput(inputs, 'cold_accommodation') ?? both;
-  const assumptions =
+  const assumed =
     hot && cold
       ? []
       : [`${hot ? 'the cold wall' : cold ? 'the hot wall' : 'each wall'} exchanges the energy wholly, α = 1`];
-  return { hotAccommodation: hot ?? plainNumber(1), coldAccommodation: cold ?? plainNumber(1), assumptions };
+  return { hot: hot ?? plainNumber(1), cold: cold ?? plainNumber(1), assumed };
 }
 
 const KEYS = ['accommodation', 'hot_accommodation', 'cold_accommodation'] as const;

@@ -4,7 +4,6 @@ import type { Composition } from '../composition';
 import { N_A, R } from '../constants';
 import type { Outcome } from '../outcome';
 import { failure, map, success } from '../outcome';
-import type { SourceId } from '../sources';
 import type { GasState } from '../state/gasState';
 import type { Trial } from '../state/request';
 import { factor } from '../state/request';
@@ -94,15 +93,6 @@ export const transition = 'heat_transition';
 export function transitionError({ species }: Composition): number {
   return species.length > 1 ? 0.05 : 0.02;
 }
-
-/** Where the conductivity and the heat capacities come from is told by the state; these tell of the walls and between. */
-export const heatSources: readonly SourceId[] = [
-  'Knudsen 1911',
-  'Welander 1954',
-  'Barichello & Siewert 2000',
-  'Bassanini 1967',
-  'Shakhov 1968',
-];
 
 /** Of the resistance R_m, what one diffuse wall adds to that of the continuum. */
 const diffuseJump = ((8 / 15) * jumpCoefficient) / Math.sqrt(Math.PI);
