@@ -82,7 +82,7 @@ function reportRelative(node: Expression, width: Quantity, value: Quantity, unit
   const kelvin = `${formatNumber(Math.abs(value.si) * width.si, 2)} K`;
   const readings = [replacement(node.span, kelvin, `Write ${kelvin}`)];
   const why = `of a temperature in ${unit} may be meant of the reading or of the kelvins; write the half-width in K`;
-  const written = `${String(Number((100 * width.si).toPrecision(4)))} %`;
+  const written = show(width);
   scope.report(ambiguousTemperature.at(node.span, { written, why, readings }));
 }
 
