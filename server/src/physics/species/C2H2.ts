@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 4.033e-10, wellDepth: 231.8 };
 
@@ -39,6 +40,9 @@ export const C2H2: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 308.3, bar: 61.4, coefficients: [-6.90128, 1.26873, -2.09113, -2.75601], low: 192.4 }),
+  ],
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220; from memory' },
     {

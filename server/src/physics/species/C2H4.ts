@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 4.163e-10, wellDepth: 224.7 };
 
@@ -39,6 +40,9 @@ export const C2H4: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 282.4, bar: 50.4, coefficients: [-6.32055, 1.16819, -1.55935, -1.83552], low: 105 }),
+  ],
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220; from memory' },
     { value: 'narcotic effects', source: 'CLP 2008', where: 'STOT SE 3, H336; from memory' },

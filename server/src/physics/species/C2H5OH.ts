@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 export const C2H5OH: Species = {
   formula: 'C2H5OH',
@@ -38,5 +39,8 @@ export const C2H5OH: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 513.9, bar: 61.4, coefficients: [-8.51838, 0.34163, -5.73683, 8.32581], low: 293 }),
+  ],
   hazards: [{ value: 'flammable liquid', source: 'CLP 2008', where: 'Flam. Liq. 2, H225; from memory' }],
 };

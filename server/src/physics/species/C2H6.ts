@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 4.443e-10, wellDepth: 215.7 };
 
@@ -39,6 +40,9 @@ export const C2H6: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 305.4, bar: 48.8, coefficients: [-6.34307, 1.0163, -1.19116, -2.03539], low: 133 }),
+  ],
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220; from memory' },
     { value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' },

@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 4.678e-10, wellDepth: 298.9 };
 
@@ -40,6 +41,9 @@ export const C3H6: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 364.9, bar: 46, coefficients: [-6.64231, 1.21857, -1.81005, -2.48212], low: 140 }),
+  ],
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220; from memory' },
     { value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' },

@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 5.118e-10, wellDepth: 237.1 };
 
@@ -39,6 +40,9 @@ export const C3H8: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 369.8, bar: 42.5, coefficients: [-6.72219, 1.33236, -2.13868, -1.38551], low: 145 }),
+  ],
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220; from memory' },
     { value: 'simple asphyxiant', source: 'OSHA HCS 2012', where: 'definition of a simple asphyxiant' },

@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 5.349e-10, wellDepth: 412.3 };
 
@@ -39,6 +40,9 @@ export const C6H6: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 562.2, bar: 48.9, coefficients: [-6.98273, 1.33213, -2.62863, -3.33399], low: 288 }),
+  ],
   hazards: [
     { value: 'flammable liquid', source: 'CLP 2008', where: 'Flam. Liq. 2, H225; from memory' },
     { value: 'carcinogenicity', source: 'CLP 2008', where: 'Carc. 1A, H350; from memory' },

@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 5.947e-10, wellDepth: 322.7 };
 
@@ -39,6 +40,9 @@ export const CCl4: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 556.4, bar: 45.6, coefficients: [-7.07139, 1.71497, -2.8993, -2.49466], low: 250.5 }),
+  ],
   hazards: [
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331; from memory' },
     { value: 'carcinogenicity', source: 'CLP 2008', where: 'Carc. 2, H351; from memory' },

@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 4.6e-10, wellDepth: 560.2 };
 
@@ -40,6 +41,9 @@ export const CH3COCH3: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 508.1, bar: 47, coefficients: [-7.45514, 1.202, -2.43926, -3.3559], low: 259 }),
+  ],
   hazards: [
     { value: 'flammable liquid', source: 'CLP 2008', where: 'Flam. Liq. 2, H225; from memory' },
     { value: 'serious eye irritation', source: 'CLP 2008', where: 'Eye Irrit. 2, H319; from memory' },

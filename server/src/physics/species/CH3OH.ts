@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 export const CH3OH: Species = {
   formula: 'CH3OH',
@@ -38,6 +39,9 @@ export const CH3OH: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 512.6, bar: 80.9, coefficients: [-8.54796, 0.76982, -3.1085, 1.54481], low: 288 }),
+  ],
   hazards: [
     { value: 'flammable liquid', source: 'CLP 2008', where: 'Flam. Liq. 2, H225; from memory' },
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331; from memory' },

@@ -1,5 +1,6 @@
 import { viscosityOfPotential } from '../transport/stockmayer';
 import type { Species } from './species';
+import { wagnerVapour } from './wagnerVapour';
 
 const potential = { diameter: 4.217e-10, wellDepth: 316 };
 
@@ -39,6 +40,9 @@ export const Cl2: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    wagnerVapour({ temperature: 416.9, bar: 79.8, coefficients: [-6.34074, 1.15037, -1.40416, -2.2322], low: 206 }),
+  ],
   hazards: [
     { value: 'oxidising gas', source: 'CLP 2008', where: 'Ox. Gas 1, H270; from memory' },
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331; from memory' },

@@ -54,5 +54,27 @@ export const D2O: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 276.97,
+        high: 643.847,
+        temperature: 643.847,
+        pressure: 21.671e6,
+        terms: [
+          { n: -7.896657, t: 1 },
+          { n: 24.73308, t: 1.89 },
+          { n: -27.81128, t: 2 },
+          { n: 9.355913, t: 3 },
+          { n: -9.220083, t: 3.6 },
+        ],
+      },
+      source: 'Harvey & Lemmon 2002',
+      where: 'eq. 4; from memory, checked against the boiling point',
+      uncertainty: 0.002,
+    },
+  ],
   hazards: [],
 };

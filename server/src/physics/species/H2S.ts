@@ -38,6 +38,24 @@ export const H2S: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'antoine',
+        phase: 'liquid',
+        low: 212,
+        high: 349.5,
+        pressure: 1e5,
+        a: 4.52887,
+        b: 958.587,
+        c: -0.539,
+      },
+      source: 'Stull 1947',
+      where:
+        'Antoine equation fitted to its table from 212.8 K, here from 212 K; from memory, checked against the boiling point; the error is our judgement',
+      uncertainty: 0.05,
+    },
+  ],
   hazards: [
     { value: 'flammable gas', source: 'CLP 2008', where: 'Flam. Gas 1, H220; from memory' },
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 2, H330; from memory' },

@@ -38,6 +38,24 @@ export const HCl: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'antoine',
+        phase: 'liquid',
+        low: 188.3,
+        high: 309.4,
+        pressure: 1e5,
+        a: 4.57389,
+        b: 868.358,
+        c: 1.754,
+      },
+      source: 'Stull 1947',
+      where:
+        'Antoine equation fitted to its table; from memory, checked against the boiling point; the error is our judgement',
+      uncertainty: 0.05,
+    },
+  ],
   hazards: [
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331; from memory' },
     { value: 'skin corrosion', source: 'CLP 2008', where: 'Skin Corr. 1A, H314; from memory' },

@@ -20,6 +20,29 @@ export const Hg: Species = {
     uncertainty: 0,
   },
   lennardJones: { value: potential, source: 'Svehla 1962', where: 'table I(a)' },
+  saturation: [
+    {
+      value: {
+        kind: 'wagner',
+        phase: 'liquid',
+        low: 234.3,
+        high: 1764,
+        temperature: 1764,
+        pressure: 167e6,
+        terms: [
+          { n: -4.57618368, t: 1 },
+          { n: -1.40726277, t: 1.89 },
+          { n: 2.36263541, t: 2 },
+          { n: -31.0889985, t: 8 },
+          { n: 58.0183959, t: 8.5 },
+          { n: -27.6304546, t: 9 },
+        ],
+      },
+      source: 'Huber 2006',
+      where: 'eq. 1; from memory, checked against the boiling point',
+      uncertainty: 0.03,
+    },
+  ],
   hazards: [
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 2, H330; from memory' },
     { value: 'reproductive toxicity', source: 'CLP 2008', where: 'Repr. 1B, H360D; from memory' },

@@ -38,6 +38,24 @@ export const SO2: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    {
+      value: {
+        kind: 'antoine',
+        phase: 'liquid',
+        low: 263,
+        high: 414.9,
+        pressure: 1e5,
+        a: 4.37798,
+        b: 966.575,
+        c: -42.071,
+      },
+      source: 'Stull 1947',
+      where:
+        'Antoine equation fitted to its table; from memory, checked against the boiling point; the error is our judgement',
+      uncertainty: 0.05,
+    },
+  ],
   hazards: [
     { value: 'acute toxicity, inhalation', source: 'CLP 2008', where: 'Acute Tox. 3, H331; from memory' },
     { value: 'skin corrosion', source: 'CLP 2008', where: 'Skin Corr. 1B, H314; from memory' },

@@ -44,6 +44,24 @@ export const iC3H7OH: Species = {
     source: 'Poling 2001',
     where: 'appendix A; from memory',
   },
+  saturation: [
+    {
+      // log₁₀(p/mmHg) = 8.11778 − 1580.92/(t/°C + 219.61).
+      value: {
+        kind: 'antoine',
+        phase: 'liquid',
+        low: 273.15,
+        high: 374.15,
+        pressure: 133.322,
+        a: 8.11778,
+        b: 1580.92,
+        c: -53.54,
+      },
+      source: 'Dean 1999',
+      where: 'table 5.9; from memory, checked against the boiling point; the error is our judgement',
+      uncertainty: 0.03,
+    },
+  ],
   hazards: [
     { value: 'flammable liquid', source: 'CLP 2008', where: 'Flam. Liq. 2, H225; from memory' },
     { value: 'serious eye irritation', source: 'CLP 2008', where: 'Eye Irrit. 2, H319; from memory' },
