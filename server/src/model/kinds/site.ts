@@ -81,7 +81,7 @@ function rarefactionSize(geometry: Record): string {
 }
 
 function isRound({ word }: Record): boolean {
-  return ['tube', 'orifice', 'particle'].includes(word);
+  return ['tube', 'orifice', 'cone', 'bend', 'particle'].includes(word);
 }
 
 /** N = nV and Ż = (n c̄/4) S */
