@@ -1,6 +1,6 @@
 import { gaussLegendre, onPanels } from '../numerics/gaussLegendre';
 import { exponentialKernel } from './exponentialKernel';
-import { linearSolve } from './linearSolve';
+import { linearSolve } from '../numerics/linearSolve';
 import type { Node } from './speeds';
 import { speeds } from './speeds';
 

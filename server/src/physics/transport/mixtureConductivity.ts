@@ -1,5 +1,5 @@
 import { R } from '../constants';
-import { solveDominant } from './linearSystem';
+import { solveDominant } from '../numerics/solveDominant';
 import type { Pairs } from './pairs';
 
 /** What a mixture conducts with: per species, and for every pair. */

@@ -1,4 +1,4 @@
-import { solveDominant } from './linearSystem';
+import { solveDominant } from '../numerics/solveDominant';
 import type { Pairs } from './pairs';
 
 /**
